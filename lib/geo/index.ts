@@ -1,0 +1,6 @@
+export * from './angles';
+export * from './footprint';
+export * from './local-plane';
+export * from './planar';
+export * from './position';
+export * from './units';

@@ -1,0 +1,121 @@
+import { booleanPointInPolygon } from '@turf/turf';
+import { distance } from './local-plane';
+import type { Vec } from './position';
+
+/** Plane geometry in metres. A ring is closed: its last vertex repeats its first. */
+export type Ring = readonly Vec[];
+/** Outer ring first, then holes. */
+export type Area = readonly Ring[];
+
+/** Where on segment ab the point nearest to p lies, and how far it is. */
+export function nearestOnSegment(p: Vec, a: Vec, b: Vec): { at: Vec; metres: number } {
+  const dx = b.x - a.x;
+  const dy = b.y - a.y;
+  const length2 = dx * dx + dy * dy;
+  const along =
+    length2 === 0 ? 0 : Math.min(1, Math.max(0, ((p.x - a.x) * dx + (p.y - a.y) * dy) / length2));
+  const at = { x: a.x + along * dx, y: a.y + along * dy };
+  return { at, metres: distance(p, at) };
+}
+
+/** Nearest point of a path of one vertex or more. An empty path is infinitely far. */
+export function nearestOnPath(p: Vec, path: readonly Vec[]): { at: Vec; metres: number } {
+  let best = { at: p, metres: Infinity };
+  if (path.length === 1 && path[0]) return { at: path[0], metres: distance(p, path[0]) };
+  for (let i = 1; i < path.length; i++) {
+    const near = nearestOnSegment(p, path[i - 1]!, path[i]!);
+    if (near.metres < best.metres) best = near;
+  }
+  return best;
+}
+
+export function pathLength(path: readonly Vec[]): number {
+  let metres = 0;
+  for (let i = 1; i < path.length; i++) metres += distance(path[i - 1]!, path[i]!);
+  return metres;
+}
+
+/** Inside the outer ring and in none of the holes; on an edge counts as inside. */
+export function insideArea(p: Vec, area: Area): boolean {
+  return booleanPointInPolygon([p.x, p.y], {
+    type: 'Polygon',
+    coordinates: area.map((ring) => ring.map((v) => [v.x, v.y])),
+  });
+}
+
+/** Metres from p to the nearest edge of the area, holes' edges included, wherever p is. */
+export function nearestEdge(p: Vec, area: Area): { at: Vec; metres: number } {
+  let best = { at: p, metres: Infinity };
+  for (const ring of area) {
+    const near = nearestOnPath(p, ring);
+    if (near.metres < best.metres) best = near;
+  }
+  return best;
+}
+
+/** Metres beyond the area's edge, negative inside. */
+export function beyondArea(p: Vec, area: Area): number {
+  const { metres } = nearestEdge(p, area);
+  return insideArea(p, area) ? 0 - metres : metres;
+}
+
+/** Metres from p to the area, 0 inside. */
+export const distanceToArea = (p: Vec, area: Area): number => Math.max(0, beyondArea(p, area));
+
+/** True where the segments share a point, touching ends included. */
+export function segmentsMeet(a: Vec, b: Vec, c: Vec, d: Vec): boolean {
+  const side = (p: Vec, q: Vec, r: Vec): number =>
+    Math.sign((q.x - p.x) * (r.y - p.y) - (q.y - p.y) * (r.x - p.x));
+  const [s1, s2] = [side(a, b, c), side(a, b, d)];
+  const [s3, s4] = [side(c, d, a), side(c, d, b)];
+  if (s1 !== s2 && s3 !== s4) return true;
+  return (
+    (s1 === 0 && withinBox(c, a, b)) ||
+    (s2 === 0 && withinBox(d, a, b)) ||
+    (s3 === 0 && withinBox(a, c, d)) ||
+    (s4 === 0 && withinBox(b, c, d))
+  );
+}
+
+const withinBox = (p: Vec, a: Vec, b: Vec): boolean =>
+  p.x >= Math.min(a.x, b.x) &&
+  p.x <= Math.max(a.x, b.x) &&
+  p.y >= Math.min(a.y, b.y) &&
+  p.y <= Math.max(a.y, b.y);
+
+/** True where some part of the path lies in the area or on its edge. */
+export function pathMeetsArea(path: readonly Vec[], area: Area): boolean {
+  if (path.some((p) => insideArea(p, area))) return true;
+  return edgesOf([path]).some(([a, b]) => edgesOf(area).some(([c, d]) => segmentsMeet(a, b, c, d)));
+}
+
+export function edgesOf(rings: readonly (readonly Vec[])[]): (readonly [Vec, Vec])[] {
+  return rings.flatMap((ring) => ring.slice(1).map((v, i) => [ring[i]!, v] as const));
+}
+
+/** Least distance between two segments, 0 where they meet. */
+export function segmentToSegment(a: Vec, b: Vec, c: Vec, d: Vec): number {
+  if (segmentsMeet(a, b, c, d)) return 0;
+  return Math.min(
+    nearestOnSegment(a, c, d).metres,
+    nearestOnSegment(b, c, d).metres,
+    nearestOnSegment(c, a, b).metres,
+    nearestOnSegment(d, a, b).metres,
+  );
+}
+
+/** Least distance between two paths, 0 where they meet. */
+export function pathToPath(one: readonly Vec[], other: readonly Vec[]): number {
+  let least = Infinity;
+  for (const [a, b] of edgesOf([one])) {
+    for (const [c, d] of edgesOf([other])) least = Math.min(least, segmentToSegment(a, b, c, d));
+  }
+  return least;
+}
+
+/** Mean of one place or more; null for none. */
+export function meanOf(places: readonly Vec[]): Vec | null {
+  if (places.length === 0) return null;
+  const sum = places.reduce((s, p) => ({ x: s.x + p.x, y: s.y + p.y }), { x: 0, y: 0 });
+  return { x: sum.x / places.length, y: sum.y / places.length };
+}

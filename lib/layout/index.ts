@@ -1,0 +1,4 @@
+export * from './pieces';
+export * from './queries';
+export * from './schema';
+export { SYSTEMS, type System } from './values';

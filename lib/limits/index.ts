@@ -1,0 +1,4 @@
+export * from './fixed-numbers';
+export * from './limit-table';
+export * from './limits';
+export * from './marks';

@@ -1,0 +1,2 @@
+// Stands for the `server-only` marker package, which refuses to load outside a React server build.
+export {};

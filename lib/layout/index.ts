@@ -1,4 +1,5 @@
 export * from './pieces';
+export * from './plan';
 export * from './queries';
 export * from './schema';
 export { SYSTEMS, type System } from './values';

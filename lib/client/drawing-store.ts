@@ -2,7 +2,16 @@ import { createStore, type StoreApi } from 'zustand/vanilla';
 import type { LayoutAnswer } from '../api';
 import { firstToFail, runChecks, standsFor } from '../checks';
 import type { Finding, FirstToFail, WindArc } from '../checks';
-import { applyEdit, commit, EditError, redo, startHistory, undo } from '../edits';
+import {
+  applyEdit,
+  commit,
+  EditError,
+  newHistory,
+  redo,
+  redoLabel,
+  undo,
+  undoLabel,
+} from '../edits';
 import type { Edit, History } from '../edits';
 import type { Limits } from '../limits';
 import type { Sheet } from '../layout';
@@ -57,9 +66,11 @@ export type DrawingState = Answers & {
   /** What could not be done, in words, until dismissed. */
   readonly complaint: string | null;
 
-  apply(edit: Edit, label: string): boolean;
-  /** Several edits as one entry of the history: one gesture, one undo. */
-  applyAll(edits: readonly Edit[], label: string): boolean;
+  /**
+   * One gesture, one entry of the history; steps that share `gesture` and follow one another are
+   * one entry too. False, with a complaint, where it can't be done.
+   */
+  apply(edits: Edit | readonly Edit[], label: string, gesture?: string): boolean;
   setPreview(edits: readonly Edit[] | null): void;
   undo(): void;
   redo(): void;
@@ -139,7 +150,7 @@ export function createDrawingStore(
         layoutVersion: answer.version,
         groundVersion: answer.site.ground_version,
       },
-      history: startHistory(first),
+      history: newHistory(first),
       sheet: first,
       preview: null,
       limits: answer.limits,
@@ -155,12 +166,10 @@ export function createDrawingStore(
       announcement: '',
       complaint: null,
 
-      apply: (edit, label) => get().applyAll([edit], label),
-
-      applyAll(edits, label) {
+      apply(edits, label, gesture) {
         const { history } = get();
         try {
-          settle(commit(history, edits, label), { complaint: null });
+          settle(commit(history, edits, label, gesture), { complaint: null });
           return true;
         } catch (error) {
           if (!(error instanceof EditError)) throw error;
@@ -188,13 +197,13 @@ export function createDrawingStore(
 
       undo() {
         const { history } = get();
-        const label = history.past.at(-1)?.label;
+        const label = undoLabel(history);
         if (label) settle(undo(history), { announcement: `Undone: ${label}` });
       },
 
       redo() {
         const { history } = get();
-        const label = history.future.at(0)?.label;
+        const label = redoLabel(history);
         if (label) settle(redo(history), { announcement: `Done again: ${label}` });
       },
 
@@ -211,7 +220,7 @@ export function createDrawingStore(
       setBase: (base) => set({ base }),
       announce: (announcement) => set({ announcement }),
       complain: (complaint) => set({ complaint }),
-      load: (sheet, base) => settle(startHistory(sheet), { base, selection: null }),
+      load: (sheet, base) => settle(newHistory(sheet), { base, selection: null }),
     };
   });
 }

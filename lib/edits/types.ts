@@ -1,5 +1,5 @@
 import type { LonLat } from '../geo';
-import type { Layout, Locate, Piece, SiteGround, Slope, Soil, Wind } from '../layout';
+import type { Layout, Locate, Piece, Sheet, SiteGround, Slope, Soil, Wind } from '../layout';
 
 /**
  * A change to the sheet as plain data: it can be saved, sent, undone and offered as a remedy.
@@ -8,7 +8,10 @@ import type { Layout, Locate, Piece, SiteGround, Slope, Soil, Wind } from '../la
 export type Edit =
   /** Adds pieces together (a rod with its jumper and cable), in the order given. */
   | { readonly type: 'place'; readonly pieces: readonly Piece[] }
-  /** Moves pieces by id to new places; ends of runs joined to them follow. */
+  /**
+   * Moves pieces by id. A point goes to `to`; a line or area goes whole, its first position to
+   * `to`. Ends of runs joined to them follow, and what stands on a moved unit goes along.
+   */
   | {
       readonly type: 'move';
       readonly moves: readonly { readonly id: string; readonly to: LonLat }[];
@@ -56,7 +59,14 @@ export type Edit =
       readonly answers?: Partial<SiteGround['answers']>;
       readonly overhead_none_known_as_of?: string | null;
       readonly locates?: readonly Locate[];
-    };
+    }
+  /** Several edits as one, in order, each seeing what those before it did. All or nothing. */
+  | { readonly type: 'together'; readonly edits: readonly Edit[] }
+  /** The whole sheet at once: an imported file, or an older version brought back. */
+  | { readonly type: 'replace'; readonly sheet: Sheet };
+
+export type EditType = Edit['type'];
+export type EditOf<T extends EditType> = Extract<Edit, { type: T }>;
 
 /** The edit names something that isn't there or can't be so. Nothing was changed. */
 export class EditError extends Error {

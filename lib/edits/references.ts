@@ -1,0 +1,41 @@
+import { findPiece, isRun, isUnit, type Layout, type Piece, type Run, type Sheet } from '../layout';
+import { ENDS } from '../layout/exchange/references';
+import { EditError } from './types';
+
+export type End = 'from' | 'to';
+
+/** True where that end of such a run may be joined to the piece. */
+export const mayJoin = (run: Run['kind'], end: End, piece: Piece): boolean =>
+  ENDS[run][end].includes(piece.kind);
+
+/** The runs with an end at the piece. */
+export const runsAt = (layout: Layout, id: string): Run[] =>
+  layout.pieces.filter(isRun).filter((run) => run.from === id || run.to === id);
+
+/** Throws where the piece names something that isn't there or can't be what it is named as. */
+export function checkReferences(sheet: Sheet, piece: Piece): void {
+  if (isRun(piece)) {
+    for (const end of ['from', 'to'] as const) {
+      const other = named(sheet, piece, end, piece[end]);
+      if (!mayJoin(piece.kind, end, other)) throw wrongKind(piece, end, other);
+    }
+    if (piece.from === piece.to) {
+      throw new EditError(`${piece.id} would run from ${piece.from} to itself`, piece.id);
+    }
+  } else if (piece.kind === 'vent' && piece.of !== undefined) {
+    const unit = named(sheet, piece, 'of', piece.of);
+    if (!isUnit(unit)) throw wrongKind(piece, 'of', unit);
+  }
+}
+
+function named(sheet: Sheet, piece: Piece, member: string, id: string): Piece {
+  const other = findPiece(sheet, id);
+  if (other) return other;
+  throw new EditError(`${piece.id} names ${id} as its ${member}, and there is no ${id}`, piece.id);
+}
+
+const wrongKind = (piece: Piece, member: string, other: Piece): EditError =>
+  new EditError(
+    `${piece.id}: the ${member} of a ${piece.kind} can't be ${other.id}, a ${other.kind}`,
+    piece.id,
+  );

@@ -1,15 +1,67 @@
+import { PublicNav } from '@/components/shell/public-nav';
 import { ButtonLink } from '@/components/ui/button';
 import { Caution } from '@/components/ui/caution';
 import { SheetFrame } from '@/components/ui/sheet-frame';
-import { ThemeSwitch } from '@/components/ui/theme-switch';
+
+const JOB = [
+  {
+    title: 'Draw it before anyone approaches',
+    words:
+      'The casualty vehicle, the receiving vehicle and the pump to true size on the map of the site; rods, jumpers, cables, probes and the tester from the kit that is on the truck.',
+  },
+  {
+    title: 'See what is wrong, and what is not known',
+    words:
+      'Spacing, wind, slope, hot zone, buried and overhead lines and the reach of every cable are checked as you draw, against the limits your agency has set. What nobody has answered is never counted as met.',
+  },
+  {
+    title: 'Hand over a sheet the crew can tape out',
+    words:
+      'The plan to scale with distances and bearings, the checks, and a numbered blank for everything that still has to be found out on the ground.',
+  },
+] as const;
 
 export default function FrontPage() {
   return (
-    <SheetFrame nav={<ThemeSwitch />} title="Stillground" caution={<Caution />}>
-      <h1 className="text-3xl font-bold">Stillground</h1>
-      <ButtonLink href="/sign-in" look="action" className="mt-6">
-        Sign in
-      </ButtonLink>
+    <SheetFrame
+      nav={<PublicNav />}
+      title="Stillground"
+      cells={[
+        { label: 'For', value: 'hazmat teams' },
+        { label: 'Verdicts by', value: 'your agency’s limits' },
+      ]}
+      caution={<Caution />}
+    >
+      <div className="max-w-[68ch]">
+        <h1 className="text-2xl font-bold leading-tight sm:text-3xl">
+          Where the rods go, before anyone goes there
+        </h1>
+        <p className="mt-4 text-lg">
+          A flammable liquid may only leave a damaged tank once three separate ground systems stand,
+          have been measured and are connected: one for the casualty vehicle, one for the receiving
+          vehicle, one for the pump. The wind shifts, the lines under the soil cannot be seen, and
+          there is little time. Stillground settles on a map where each thing goes, whether it may
+          go there and whether the kit reaches.
+        </p>
+        <div className="mt-6 flex flex-wrap items-center gap-4">
+          <ButtonLink href="/sign-in" look="action">
+            Sign in
+          </ButtonLink>
+          <ButtonLink href="/blank-readings">Print a blank readings page</ButtonLink>
+        </div>
+        <p className="mt-2 text-ink-soft">The blank page needs no sign-in.</p>
+      </div>
+      <ol className="mt-10 grid gap-x-8 border-t border-rule md:grid-cols-3">
+        {JOB.map((step, index) => (
+          <li key={step.title} className="border-b border-rule-faint py-4 md:border-b-0">
+            <h2 className="text-lg font-bold">
+              <span className="mr-2 text-ink-soft">{index + 1}</span>
+              {step.title}
+            </h2>
+            <p className="mt-1">{step.words}</p>
+          </li>
+        ))}
+      </ol>
     </SheetFrame>
   );
 }

@@ -13,6 +13,7 @@ export function SheetFrame({
   status,
   cells = [],
   caution,
+  printBare = false,
   children,
 }: {
   nav: ReactNode;
@@ -21,28 +22,48 @@ export function SheetFrame({
   status?: ReactNode;
   cells?: readonly TitleCell[];
   caution?: ReactNode;
+  /** Only the sheet's contents go on paper, without frame and title block. */
+  printBare?: boolean;
   children: ReactNode;
 }) {
+  const onPaper = printBare
+    ? {
+        outer: 'print:p-0',
+        rule: 'print:border-0',
+        frame: 'print:m-0 print:border-0',
+        foot: 'print:hidden',
+      }
+    : { outer: '', rule: '', frame: '', foot: '' };
   return (
-    <div className="min-h-dvh p-1.5 sm:p-2">
-      <div className="flex min-h-[calc(100dvh-0.75rem)] flex-col border border-rule sm:min-h-[calc(100dvh-1rem)]">
+    <div className={`min-h-dvh p-1.5 sm:p-2 print:min-h-0 ${onPaper.outer}`}>
+      <div
+        className={`flex min-h-[calc(100dvh-0.75rem)] flex-col border border-rule sm:min-h-[calc(100dvh-1rem)] print:min-h-0 ${onPaper.rule}`}
+      >
         <a
           href="#sheet"
           className="sr-only bg-ink px-4 py-3 text-paper focus:not-sr-only focus:absolute focus:z-50"
         >
           Skip to the sheet
         </a>
-        <header className="px-3 sm:px-6">{nav}</header>
-        <div className="mx-2 flex grow flex-col border-2 border-ink bg-paper sm:mx-6">
-          <main id="sheet" tabIndex={-1} className="grow px-4 py-6 outline-none sm:px-8 sm:py-8">
+        <header className="px-3 sm:px-6 print:hidden">{nav}</header>
+        <div
+          className={`mx-2 flex grow flex-col border-2 border-ink bg-paper sm:mx-6 ${onPaper.frame}`}
+        >
+          <main
+            id="sheet"
+            tabIndex={-1}
+            className={`grow outline-none ${printBare ? 'print:p-0' : ''} px-4 py-6 sm:px-8 sm:py-8`}
+          >
             {children}
           </main>
-          <footer className="flex flex-col sm:flex-row sm:items-end sm:justify-between">
+          <footer
+            className={`flex flex-col sm:flex-row sm:items-end sm:justify-between ${onPaper.foot}`}
+          >
             <div className="px-4 pb-4 sm:max-w-[60ch] sm:px-8 sm:pb-6">{caution}</div>
             <TitleBlock title={title} status={status} cells={cells} />
           </footer>
         </div>
-        <div className="h-2 sm:h-6" />
+        <div className="h-2 sm:h-6 print:hidden" />
       </div>
     </div>
   );

@@ -16,7 +16,7 @@ import type { Edit, History } from '../edits';
 import type { Limits } from '../limits';
 import type { Sheet } from '../layout';
 import type { InHand } from './in-hand';
-import { saveState, type SaveState } from './save-state';
+import { saveState, type SaveState } from './saving/save-state';
 
 /** What surrounds the sheet: whose it is, where it lies, who looks at it. */
 export type DrawingMeta = {

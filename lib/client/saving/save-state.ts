@@ -1,12 +1,5 @@
 export type SaveStatus =
-  | 'saved'
-  | 'unsaved'
-  | 'saving'
-  | 'offline'
-  | 'failed'
-  | 'stale'
-  | 'signed-out'
-  | 'read-only';
+  'saved' | 'unsaved' | 'saving' | 'offline' | 'failed' | 'stale' | 'signed-out' | 'read-only';
 
 /** Where the drawing is kept at this moment, in words for the margin. */
 export type SaveState = {

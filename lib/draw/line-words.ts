@@ -1,0 +1,56 @@
+import { distance, pathLength, type Vec } from '../geo';
+import { along } from './curves';
+import type { Frame } from './frame';
+import { words } from './marks';
+import { textWidth } from './text-width';
+import type { Token } from './themes';
+import type { TextMark } from './types';
+import { readableTurn } from './vectors';
+
+const SIZE_PX = 14;
+/** One word about every so many px, the first where a short line still carries one. */
+const EVERY_PX = 320;
+const MOST_WORDS = 40;
+
+/**
+ * The word repeated along the line, counted from its first vertex, so that words stay where they
+ * are while the sheet is moved. A word never bends: it is left out where the line turns under it.
+ */
+export function wordsAlong(
+  frame: Frame,
+  path: readonly Vec[],
+  text: string,
+  token: Token,
+  size = SIZE_PX,
+): TextMark[] {
+  const length = pathLength(path);
+  const wide = frame.metres(textWidth(text, size, 600) + 12);
+  if (length < wide * 1.4) return [];
+  const count = Math.min(MOST_WORDS, Math.max(1, Math.round(length / frame.metres(EVERY_PX))));
+  return Array.from({ length: count }, (_, i) => {
+    const middle = ((i + 0.5) * length) / count;
+    return straightPlace(path, middle, wide, length / count / 2);
+  }).flatMap((place) =>
+    place ? [words(place.at, text, size, { token, turnDeg: readableTurn(place.direction) })] : [],
+  );
+}
+
+/** The nearest place to `middle` within `reach` where the path runs straight for `wide` metres. */
+function straightPlace(
+  path: readonly Vec[],
+  middle: number,
+  wide: number,
+  reach: number,
+): { at: Vec; direction: Vec } | null {
+  for (let step = 0; step <= 6; step++) {
+    for (const side of step === 0 ? [0] : [1, -1]) {
+      const centre = middle + (side * step * reach) / 7;
+      const [from, to] = [along(path, centre - wide / 2), along(path, centre + wide / 2)];
+      const at = along(path, centre);
+      if (!from || !to || !at) continue;
+      const chord = distance(from.at, to.at);
+      if (chord > wide * 0.985) return at;
+    }
+  }
+  return null;
+}

@@ -1,0 +1,36 @@
+/**
+ * The base map's inks: pale enough that the plan's strokes and the utilities' colours stand out on
+ * top, and light against dark in the same order when the night theme turns them over.
+ */
+export const INKS = {
+  paper: '#fbf9f3',
+  field: '#f8f4e8',
+  furrow: '#eee8d8',
+  contour: '#ddd6c4',
+  indexContour: '#c3b99f',
+  height: '#756c5b',
+  gravel: '#f1ebdd',
+  stone: '#d8cfbb',
+  asphalt: '#e5dfd1',
+  concrete: '#ece8de',
+  joint: '#dcd6c8',
+  kerb: '#b5ab97',
+  roadPaint: '#fffefa',
+  ballast: '#eee8da',
+  tie: '#c9bfab',
+  rail: '#857b69',
+  building: '#e9e1cf',
+  wall: '#8f8571',
+  tank: '#f4efe2',
+  fence: '#9d9380',
+  wire: '#c2b8a4',
+  pole: '#857b69',
+  ditch: '#eceee8',
+  ditchBank: '#b4bab2',
+  water: '#667a7c',
+  crown: '#eef0e2',
+  crownEdge: '#c0c6ab',
+  name: '#5a5245',
+  thing: '#6b6252',
+  neatline: '#9d9380',
+} as const;

@@ -12,7 +12,7 @@ const one = (value: string | string[] | undefined): string | null =>
   (Array.isArray(value) ? value[0] : value) ?? null;
 
 export default async function SignInPage({ searchParams }: { searchParams: Search }) {
-  const { callbackUrl, after } = await searchParams;
+  const { callbackUrl, after, error } = await searchParams;
   const back = one(callbackUrl);
   return (
     <SheetFrame nav={<PublicNav signIn={false} />} title="Sign in">
@@ -24,7 +24,7 @@ export default async function SignInPage({ searchParams }: { searchParams: Searc
         <p className="mt-2 max-w-md text-ink-soft">Then you go on to the page you asked for.</p>
       )}
       <div className="mt-6">
-        <SignInForm back={back} />
+        <SignInForm back={back} refused={one(error)} />
       </div>
       <section aria-labelledby="forgotten" className="mt-10 max-w-md border-t border-rule pt-4">
         <h2 id="forgotten" className="font-bold">

@@ -8,17 +8,20 @@ import { z } from 'zod';
 import { Button } from '@/components/ui/button';
 import { Field, Input } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
+import { signInWords } from '@/lib/api/sign-in';
 import { returnPath } from './return-path';
-import { refusalFor, UNREACHABLE, type Refusal } from './refusals';
 
 const entered = z.object({
   email: z.string().trim().min(1, { error: 'Enter your e-mail address.' }),
   password: z.string().min(1, { error: 'Enter your password.' }),
 });
 
-/** `back` comes from the address and is only followed to a page of this server. */
-export function SignInForm({ back }: { back: string | null }) {
-  const [refusal, setRefusal] = useState<Refusal | null>(null);
+const UNREACHABLE =
+  'The server can’t be reached. What you entered is still here: check the network and try again.';
+
+/** `refused` is what next-auth's redirect says of an earlier try. `back` comes from the address and is only followed to a page of this server. */
+export function SignInForm({ back, refused }: { back: string | null; refused: string | null }) {
+  const [refusal, setRefusal] = useState(refused && signInWords(refused));
   const { register, handleSubmit, formState, resetField, setFocus } = useForm({
     resolver: zodResolver(entered),
     defaultValues: { email: '', password: '' },
@@ -34,7 +37,7 @@ export function SignInForm({ back }: { back: string | null }) {
       window.location.assign(returnPath(back, window.location.origin));
       return;
     }
-    setRefusal(answer ? refusalFor(answer.error, answer.status) : UNREACHABLE);
+    setRefusal(answer ? signInWords(answer.error ?? 'unknown') : UNREACHABLE);
     if (answer) {
       resetField('password');
       setFocus('password');
@@ -45,8 +48,8 @@ export function SignInForm({ back }: { back: string | null }) {
   return (
     <form onSubmit={submit} noValidate className="flex max-w-md flex-col gap-5">
       {refusal && (
-        <Notice kind="failed" title={refusal.title}>
-          {refusal.next}
+        <Notice kind="failed" title="Not signed in.">
+          {refusal}
         </Notice>
       )}
       <Field label="E-mail" error={formState.errors.email?.message}>

@@ -1,0 +1,82 @@
+'use client';
+
+import 'leaflet/dist/leaflet.css';
+import L from 'leaflet';
+import { useRouter } from 'next/navigation';
+import { useEffect, useMemo } from 'react';
+import { MapContainer, ScaleControl, useMap } from 'react-leaflet';
+import { Graticule } from '@/components/map-paper/graticule';
+import type { SiteRow } from '@/lib/api';
+
+type Placed = SiteRow & { at: NonNullable<SiteRow['at']> };
+
+/** A lone site is shown with some miles of its surroundings. */
+const CLOSEST_ZOOM = 11;
+const ROOM_FOR_NAMES: L.PointTuple = [60, 48];
+
+/** Where the listed sites lie, on plain paper: no tiles are fetched from anywhere. */
+export function SitesMap({ sites }: { sites: readonly SiteRow[] }) {
+  // Kept while the list is: a new array would move the map back under the reader's hand.
+  const placed = useMemo(() => sites.filter((site): site is Placed => site.at !== null), [sites]);
+  const unplaced = sites.length - placed.length;
+  return (
+    <>
+      <MapContainer
+        center={[39, -98]}
+        zoom={4}
+        attributionControl={false}
+        scrollWheelZoom={false}
+        className="h-80 border border-ink lg:h-[28rem]"
+      >
+        <Graticule />
+        <ScaleControl metric={false} />
+        <SiteButtons sites={placed} />
+      </MapContainer>
+      {unplaced > 0 && (
+        <p className="mt-2 text-ink-soft">
+          {unplaced === 1 ? 'One site has' : `${unplaced} sites have`} no position entered and can’t
+          be shown here.
+        </p>
+      )}
+    </>
+  );
+}
+
+function SiteButtons({ sites }: { sites: readonly Placed[] }) {
+  const map = useMap();
+  const router = useRouter();
+  useEffect(() => {
+    const layer = L.layerGroup().addTo(map);
+    for (const site of sites) {
+      const [lon, lat] = site.at;
+      L.marker([lat, lon], {
+        keyboard: false,
+        interactive: false,
+        icon: L.divIcon({
+          className: 'site-mark',
+          iconSize: [0, 0],
+          html: siteButton(site.name, () => router.push(`/sites/${site.id}`)),
+        }),
+      }).addTo(layer);
+    }
+    if (sites.length > 0) {
+      map.fitBounds(L.latLngBounds(sites.map((site) => [site.at[1], site.at[0]])), {
+        padding: ROOM_FOR_NAMES,
+        maxZoom: CLOSEST_ZOOM,
+        animate: false,
+      });
+    }
+    return () => void layer.remove();
+  }, [map, router, sites]);
+  return null;
+}
+
+/** A real button, so that the keyboard and screen readers reach it like any other. */
+function siteButton(name: string, open: () => void): HTMLButtonElement {
+  const button = document.createElement('button');
+  button.type = 'button';
+  button.textContent = name;
+  button.addEventListener('click', open);
+  L.DomEvent.disableClickPropagation(button);
+  return button;
+}

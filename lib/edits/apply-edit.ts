@@ -53,5 +53,5 @@ export function applyEdit(sheet: Sheet, edit: Edit): Sheet {
 
 /** Unreachable while the switch is whole; edits that came as JSON may still be of another kind. */
 function unknownEdit(edit: never): never {
-  throw new EditError(`there is no edit called ${String((edit as { type?: unknown }).type)}`);
+  throw new EditError(`There is no edit called ${String((edit as { type?: unknown }).type)}.`);
 }

@@ -1,4 +1,10 @@
 export { applyEdit } from './apply-edit';
+export * from './bringing';
+export { describe } from './describe';
 export * from './history';
 export { anchorOf } from './move';
+export { KIND_WORDS, pieceWords } from './piece-words';
+export { mayJoin, runsAt, type End } from './references';
 export * from './types';
+export { edgeOfUnit, ontoUnit, standsOn } from './unit-frame';
+export * from './zone';

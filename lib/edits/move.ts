@@ -1,6 +1,7 @@
 import { quantise, samePosition, type LonLat } from '../geo';
 import { isRun, planeOf, positionsOf, type Layout, type Piece, type Sheet } from '../layout';
 import { carry, type Shift } from './carry';
+import { KIND_WORDS, pieceWords } from './piece-words';
 import { settledPiece } from './settled-piece';
 import { shiftBetween, shifted } from './shifted';
 import { requirePiece } from './sheet-pieces';
@@ -15,10 +16,14 @@ export function move(sheet: Sheet, { moves }: EditOf<'move'>): Sheet {
   const shifts: Shift[] = [];
   for (const { id, to } of moves) {
     const before = requirePiece(sheet, id);
-    if (seen.has(id)) throw new EditError(`${id} is moved to two places at once`, id);
+    if (seen.has(id))
+      throw new EditError(`${pieceWords(before)} can't go to two places at once.`, id);
     seen.add(id);
     if (isRun(before)) {
-      throw new EditError(`${id} lies between two pieces; move those, or reshape it`, id);
+      throw new EditError(
+        `A ${KIND_WORDS[before.kind]} lies between two pieces. Move those, or its corners.`,
+        id,
+      );
     }
     const place = quantise(to);
     if (samePosition(place, anchorOf(before))) continue;

@@ -8,6 +8,7 @@ import {
   type Run,
   type Sheet,
 } from '../layout';
+import { KIND_WORDS } from './piece-words';
 import { checkReferences } from './references';
 import { settledPiece } from './settled-piece';
 import { withAdded, withPieces } from './sheet-pieces';
@@ -25,7 +26,10 @@ export function place(sheet: Sheet, { pieces }: EditOf<'place'>): Sheet {
   checkOneOfEach(sheet, settled);
   const placed = withAdded(sheet, settled);
   if (placed.layout.pieces.length > MOST_PIECES) {
-    throw new EditError(`a layout holds at most ${MOST_PIECES} pieces`, settled.at(-1)!.id);
+    throw new EditError(
+      `A layout holds at most ${MOST_PIECES} pieces. Remove some first.`,
+      settled.at(-1)!.id,
+    );
   }
   settled.forEach((piece) => checkReferences(placed, piece));
   const laid = settled.filter(isRun).map((run) => laidOnto(placed, run));
@@ -36,7 +40,7 @@ function checkIds(sheet: Sheet, added: readonly Piece[]): void {
   const seen = new Set<string>();
   for (const { id } of added) {
     if (seen.has(id) || findPiece(sheet, id)) {
-      throw new EditError(`there is already a piece ${id} on the drawing`, id);
+      throw new EditError(`There is already a piece with the id ${id} on the drawing.`, id);
     }
     seen.add(id);
   }
@@ -46,7 +50,10 @@ function checkOneOfEach(sheet: Sheet, added: readonly Piece[]): void {
   const drawn = new Set<string>(sheet.layout.pieces.filter(isUnit).map((unit) => unit.kind));
   for (const unit of added.filter(isUnit)) {
     if (drawn.has(unit.kind)) {
-      throw new EditError(`a layout has one ${unit.kind}; ${unit.id} would be another`, unit.id);
+      throw new EditError(
+        `There is already a ${KIND_WORDS[unit.kind]} on the drawing. Move it, or remove it first.`,
+        unit.id,
+      );
     }
     drawn.add(unit.kind);
   }

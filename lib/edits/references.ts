@@ -1,5 +1,6 @@
 import { findPiece, isRun, isUnit, type Layout, type Piece, type Run, type Sheet } from '../layout';
 import { ENDS } from '../layout/exchange/references';
+import { KIND_WORDS, pieceWords } from './piece-words';
 import { EditError } from './types';
 
 export type End = 'from' | 'to';
@@ -20,7 +21,10 @@ export function checkReferences(sheet: Sheet, piece: Piece): void {
       if (!mayJoin(piece.kind, end, other)) throw wrongKind(piece, end, other);
     }
     if (piece.from === piece.to) {
-      throw new EditError(`${piece.id} would run from ${piece.from} to itself`, piece.id);
+      throw new EditError(
+        `A ${KIND_WORDS[piece.kind]} can't run from a piece to itself. Choose another piece for one end.`,
+        piece.id,
+      );
     }
   } else if (piece.kind === 'vent' && piece.of !== undefined) {
     const unit = named(sheet, piece, 'of', piece.of);
@@ -31,11 +35,14 @@ export function checkReferences(sheet: Sheet, piece: Piece): void {
 function named(sheet: Sheet, piece: Piece, member: string, id: string): Piece {
   const other = findPiece(sheet, id);
   if (other) return other;
-  throw new EditError(`${piece.id} names ${id} as its ${member}, and there is no ${id}`, piece.id);
+  throw new EditError(
+    `What ${pieceWords(piece)} is joined to (${member}: ${id}) is not on the drawing.`,
+    piece.id,
+  );
 }
 
 const wrongKind = (piece: Piece, member: string, other: Piece): EditError =>
   new EditError(
-    `${piece.id}: the ${member} of a ${piece.kind} can't be ${other.id}, a ${other.kind}`,
+    `${pieceWords(other)} can't be the ${member} of a ${KIND_WORDS[piece.kind]}. Choose another piece.`,
     piece.id,
   );

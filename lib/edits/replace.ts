@@ -1,4 +1,5 @@
 import { isUnit, layoutSchema, siteGroundSchema, type Piece, type Sheet } from '../layout';
+import { KIND_WORDS } from './piece-words';
 import { checkReferences } from './references';
 import { same } from './same';
 import { EditError, type EditOf } from './types';
@@ -35,11 +36,14 @@ function checkWhole(sheet: Sheet): void {
   const units = new Set<string>();
   const all: readonly Piece[] = [...sheet.layout.pieces, ...sheet.site.features];
   for (const piece of all) {
-    if (ids.has(piece.id)) throw new EditError(`the id ${piece.id} is used twice`, piece.id);
+    if (ids.has(piece.id)) throw new EditError(`The id ${piece.id} is used twice.`, piece.id);
     ids.add(piece.id);
     if (!isUnit(piece)) continue;
     if (units.has(piece.kind)) {
-      throw new EditError(`a layout has one ${piece.kind}; ${piece.id} is another`, piece.id);
+      throw new EditError(
+        `A layout has one ${KIND_WORDS[piece.kind]}; ${piece.id} is another.`,
+        piece.id,
+      );
     }
     units.add(piece.kind);
   }

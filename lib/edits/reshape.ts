@@ -1,5 +1,6 @@
 import { quantise, samePosition, type LonLat } from '../geo';
 import { isRun, isUnit, planeOf, type Piece, type Sheet } from '../layout';
+import { pieceWords } from './piece-words';
 import { settledPiece } from './settled-piece';
 import { requirePiece, withPieces } from './sheet-pieces';
 import { EditError, type EditOf } from './types';
@@ -18,7 +19,10 @@ export function reshape(sheet: Sheet, edit: Reshape): Sheet {
   const parts = partsOf(piece);
   const part = parts?.[edit.part];
   if (!parts || !part) {
-    throw new EditError(`${edit.id} has no ${closed ? 'ring' : 'line'} ${edit.part}`, edit.id);
+    throw new EditError(
+      `${pieceWords(piece)} has no ${closed ? 'ring' : 'line'} of that number.`,
+      edit.id,
+    );
   }
   const vertices = closed ? part.slice(0, -1) : part;
   const to = settledPlace(sheet, piece, edit, vertices.length);
@@ -26,7 +30,7 @@ export function reshape(sheet: Sheet, edit: Reshape): Sheet {
   if (reshaped === vertices) return sheet;
   if (reshaped.length < (closed ? 3 : 2)) {
     throw new EditError(
-      `${edit.id} would have too few corners left; remove it whole instead`,
+      `${pieceWords(piece)} would have too few corners left. Remove it whole instead.`,
       edit.id,
     );
   }
@@ -41,7 +45,7 @@ function reshapedPart(edit: Reshape, vertices: LonLat[], to: LonLat | null): Lon
   const { vertex, insert, id } = edit;
   const last = insert ? vertices.length : vertices.length - 1;
   if (!Number.isInteger(vertex) || vertex < 0 || vertex > last) {
-    throw new EditError(`${id} has no corner ${vertex}`, id);
+    throw new EditError(`There is no corner ${vertex} to change.`, id);
   }
   if (to === null) return vertices.toSpliced(vertex, 1);
   if (insert) return vertices.toSpliced(vertex, 0, to);
@@ -58,7 +62,7 @@ function settledPlace(sheet: Sheet, piece: Piece, edit: Reshape, count: number):
   const holder = requirePiece(sheet, piece[end]);
   if (to && !edit.insert && isUnit(holder)) return ontoUnit(planeOf(sheet.layout), holder, to);
   throw new EditError(
-    `that end of ${piece.id} is on ${holder.id}; lead it to another piece instead`,
+    `That end is on ${pieceWords(holder)}. Lead it to another piece instead.`,
     piece.id,
   );
 }

@@ -13,7 +13,7 @@ type Condition = keyof typeof SCHEMAS;
 export function setConditions(sheet: Sheet, edit: EditOf<'set-conditions'>): Sheet {
   const conditions: Conditions = { ...sheet.layout.conditions };
   for (const [name, value] of Object.entries(edit.conditions)) {
-    if (!isCondition(name)) throw new EditError(`there is no condition called ${name}`);
+    if (!isCondition(name)) throw new EditError(`There is no condition called ${name}.`);
     const before = conditions[name] ?? null;
     if (value === undefined || (value === null && before === null)) continue;
     if (value === null) delete conditions[name];
@@ -32,5 +32,5 @@ function settled(name: Condition, before: object, value: object): Record<string,
   const answer = SCHEMAS[name].safeParse(Object.fromEntries([...kept, ...given]));
   if (answer.success) return answer.data;
   const faults = new Set(answer.error.issues.map((issue) => issue.message));
-  throw new EditError(`${name}: ${[...faults].join('; ')}`);
+  throw new EditError(`${name}: ${[...faults].join('; ')}.`);
 }

@@ -18,7 +18,7 @@ export function setGround(sheet: Sheet, edit: EditOf<'set-ground'>): Sheet {
   const answer = RECORDED.safeParse(draft);
   if (!answer.success) {
     const faults = new Set(answer.error.issues.map((issue) => issue.message));
-    throw new EditError([...faults].join('; '));
+    throw new EditError(`${[...faults].join('; ')}.`);
   }
   return { ...sheet, site: { ...site, ...answer.data } };
 }

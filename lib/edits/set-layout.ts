@@ -14,11 +14,11 @@ const SETTABLE = layoutSchema.pick({
 export function setLayout(sheet: Sheet, { members }: EditOf<'set-layout'>): Sheet {
   const given = Object.entries(members).filter(([, value]) => value !== undefined);
   const unknown = given.find(([name]) => !(name in SETTABLE.shape));
-  if (unknown) throw new EditError(`${unknown[0]} of a layout can't be set`);
+  if (unknown) throw new EditError(`The ${unknown[0]} of a layout can't be set.`);
   const answer = SETTABLE.partial().safeParse(Object.fromEntries(given));
   if (!answer.success) {
     const faults = new Set(answer.error.issues.map((issue) => issue.message));
-    throw new EditError([...faults].join('; '));
+    throw new EditError(`${[...faults].join('; ')}.`);
   }
   const layout = { ...sheet.layout, ...answer.data };
   return same(layout, sheet.layout) ? sheet : { ...sheet, layout };

@@ -1,6 +1,7 @@
 import { isUnit, pieceSchema, unitSizeFt, type Piece, type Sheet, type Unit } from '../layout';
 import { carry } from './carry';
 import { nextRodLabel, isSystemLabel } from './labels';
+import { KIND_WORDS } from './piece-words';
 import { checkReferences } from './references';
 import { same } from './same';
 import { settledPiece } from './settled-piece';
@@ -21,7 +22,7 @@ export function setPiece(sheet: Sheet, { id, members }: EditOf<'set-piece'>): Sh
   const draft: Record<string, unknown> = { ...before };
   for (const [name, value] of Object.entries(members)) {
     if (NOT_HERE.has(name) || !(name in pieceSchema(before.kind).shape)) {
-      throw new EditError(`${id}: ${name} can't be set on a ${before.kind}`, id);
+      throw new EditError(`The ${name} of a ${KIND_WORDS[before.kind]} can't be set.`, id);
     }
     if (value === null || value === undefined) delete draft[name];
     else draft[name] = value;

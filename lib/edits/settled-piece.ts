@@ -9,6 +9,7 @@ import {
   type Layout,
   type Piece,
 } from '../layout';
+import { KIND_WORDS, pieceWords } from './piece-words';
 import { EditError } from './types';
 
 /** Farther from the origin a place is a slip, and the exchange file refuses it. */
@@ -20,21 +21,21 @@ const FARTHEST_MILES = 5;
  */
 export function settledPiece(layout: Layout, piece: Piece): Piece {
   if (!isKind(piece.kind)) {
-    throw new EditError(`${piece.id}: there is no kind of piece called ${piece.kind}`, piece.id);
+    throw new EditError(`There is no kind of piece called ${String(piece.kind)}.`, piece.id);
   }
   const schema = pieceSchema(piece.kind);
   const settled: Record<string, unknown> = {};
   for (const [name, value] of Object.entries(piece)) {
     if (value === undefined) continue;
     if (!(name in schema.shape)) {
-      throw new EditError(`${piece.id}: a ${piece.kind} has no ${name}`, piece.id);
+      throw new EditError(`A ${KIND_WORDS[piece.kind]} has no ${name}.`, piece.id);
     }
     settled[name] = PLACE_KEYS.has(name) ? quantised(value) : value;
   }
   const answer = schema.safeParse(settled);
   if (!answer.success) {
     const faults = new Set(answer.error.issues.map((issue) => issue.message));
-    throw new EditError(`${piece.id}: ${[...faults].join('; ')}`, piece.id);
+    throw new EditError(`${pieceWords(piece)}: ${[...faults].join('; ')}.`, piece.id);
   }
   checkWithinReach(layout, answer.data);
   return answer.data;
@@ -53,7 +54,7 @@ function checkWithinReach(layout: Layout, piece: Piece): void {
   const reach = isSiteKind(piece.kind) ? Math.min(...away) : Math.max(...away);
   if (reach <= FARTHEST_MILES * METRES_PER_MILE) return;
   throw new EditError(
-    `${piece.id} would lie more than ${FARTHEST_MILES} miles from the drawing's origin`,
+    `${pieceWords(piece)} would lie more than ${FARTHEST_MILES} miles from the middle of the drawing.`,
     piece.id,
   );
 }

@@ -6,7 +6,7 @@ import { EditError } from './types';
 
 export function requirePiece(sheet: Sheet, id: string): Piece {
   const piece = findPiece(sheet, id);
-  if (!piece) throw new EditError(`there is no piece ${id} on the drawing`, id);
+  if (!piece) throw new EditError('That piece is no longer on the drawing.', id);
   return piece;
 }
 

@@ -53,3 +53,13 @@ export const PIECE_DEFAULTS = {
   vehicle: { ...OUR_DEFAULT, length_ft: 65, width_ft: 8.5 },
   pump: { ...OUR_DEFAULT, length_ft: 6, width_ft: 4 },
 } as const;
+
+/** Radius of an area put down with one press, before anyone shapes it. */
+export const AREA_DRAWN_RADIUS_FT = {
+  ...OUR_DEFAULT,
+  'hot-zone': 50,
+  'warm-zone': 100,
+  pool: 8,
+  'no-drive': 15,
+  'low-ground': 15,
+} as const;

@@ -3,4 +3,5 @@ export * from './footprint';
 export * from './local-plane';
 export * from './planar';
 export * from './position';
+export * from './segment-index';
 export * from './units';

@@ -1,0 +1,42 @@
+'use client';
+
+import dynamic from 'next/dynamic';
+import { CAUTION_WORDS } from '@/components/ui/caution';
+import { ConditionsPanel } from '@/components/conditions';
+import { TitleBlock } from '@/components/title-block';
+import { useView } from '../map/view-store';
+import { IndexTabs } from './index-tabs';
+import { PlanFrame } from './plan-frame';
+import { SaveLine } from './save-line';
+
+/** The sheet on a desk: plan in its ruled frame, strip at the right, kit in the bottom margin. */
+export function DrawingSheet() {
+  return (
+    <div className="h-dvh p-2">
+      <div className="grid h-full grid-cols-[minmax(0,1fr)_25rem] border border-rule">
+        <div className="flex min-w-0 flex-col">
+          <div className="flex min-w-0 items-end justify-between gap-4 pl-8 pt-1.5">
+            <IndexTabs />
+            <SaveLine />
+          </div>
+          <main className="min-h-0 grow" aria-label="Plan">
+            <PlanFrame />
+          </main>
+          <div className="min-h-20 pl-8" />
+        </div>
+        <aside className="flex min-h-0 flex-col border-l-2 border-ink">
+          <ConditionsPanel />
+          <div className="flex min-h-0 grow flex-col border-t border-ink">
+            
+          </div>
+          <ScaledTitleBlock />
+        </aside>
+      </div>
+    </div>
+  );
+}
+
+function ScaledTitleBlock() {
+  const metresPerPx = useView((state) => state.atRest?.metresPerPx ?? null);
+  return <TitleBlock metresPerPx={metresPerPx} />;
+}

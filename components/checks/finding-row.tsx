@@ -1,0 +1,108 @@
+'use client';
+
+import { useId, useState } from 'react';
+import type { Finding, Missing } from '@/lib/checks';
+import { Button } from '@/components/ui/button';
+import { STATUS_INK, STATUS_WORDS } from '@/components/ui/status';
+import { StatusShape } from '@/components/ui/status-mark';
+import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
+import { needsAttention } from './count-findings';
+import { EnterHere } from './enter/enter-here';
+import { Gauge } from './gauge';
+import { lineWords, pieceOf } from './line-words';
+import { allowedWords, valueWords } from './measure-words';
+import { Why } from './why';
+
+/**
+ * One finding: status, words, value, gauge; its remedy, or the field for what is not known, under
+ * it. The plan shows it while it is pointed at, and pressing it selects what it is about.
+ */
+export function FindingRow({
+  finding,
+  title,
+  offered,
+}: {
+  finding: Finding;
+  title: string;
+  /** Of what is missing here, that whose field stands in this line. */
+  offered: ReadonlySet<Missing>;
+}) {
+  const store = useDrawingStore();
+  const words = useDrawing((s) => lineWords(s.sheet, finding));
+  const shown = useDrawing((s) => s.shownFinding === finding.id);
+  const [why, setWhy] = useState(false);
+  const whyId = useId();
+  const attention = needsAttention(finding.status);
+  const ink = STATUS_INK[finding.status];
+  const allowed = finding.allowed && allowedWords(finding.allowed);
+
+  const point = (at: boolean): void => store.getState().showFinding(at ? finding.id : null);
+  const press = (): void => {
+    const piece = pieceOf(store.getState().sheet, finding);
+    if (piece) store.getState().select(piece);
+    setWhy(!why);
+  };
+
+  return (
+    <li
+      data-status={finding.status}
+      className={`py-0.5 ${shown ? 'bg-rule-faint/60' : ''}`}
+      onPointerEnter={() => point(true)}
+      onPointerLeave={() => point(false)}
+      onFocus={() => point(true)}
+      onBlur={() => point(false)}
+    >
+      <button
+        type="button"
+        aria-expanded={why}
+        aria-controls={whyId}
+        onClick={press}
+        className="pointer-coarse:min-h-11 grid min-h-7 w-full cursor-pointer grid-cols-[1.125rem_minmax(0,1fr)_auto] items-baseline gap-x-1.5 text-left leading-snug"
+      >
+        <StatusShape status={finding.status} />
+        <span>
+          <span className="sr-only">{STATUS_WORDS[finding.status]}: </span>
+          {words}
+        </span>
+        <strong className={`whitespace-nowrap pl-2 text-lg leading-tight ${ink}`}>
+          {finding.measured
+            ? valueWords(finding.measured, finding.allowed, finding.status === 'meets')
+            : finding.status === 'not-known' && 'not known'}
+        </strong>
+      </button>
+      <Gauge finding={finding} />
+      {attention && (
+        <div className="ml-6 flex flex-wrap items-center gap-x-4 gap-y-1 pb-1">
+          <RemedyButton finding={finding} />
+          <EnterHere finding={finding} offered={offered} />
+          <button
+            type="button"
+            aria-expanded={why}
+            aria-controls={whyId}
+            className="pointer-coarse:min-h-11 min-h-8 cursor-pointer underline underline-offset-4"
+            onClick={() => setWhy(!why)}
+          >
+            {allowed ? `Why ${allowed}` : 'Why'}
+          </button>
+        </div>
+      )}
+      {why ? <Why id={whyId} finding={finding} title={title} /> : <span id={whyId} hidden />}
+    </li>
+  );
+}
+
+function RemedyButton({ finding }: { finding: Finding }) {
+  const apply = useDrawing((s) => s.apply);
+  const canDraw = useDrawing((s) => s.canDraw);
+  const { remedy } = finding;
+  if (!remedy || !canDraw) return null;
+  return (
+    <Button
+      look="action"
+      className="pointer-coarse:!min-h-11 !min-h-9 !px-3 font-bold"
+      onClick={() => apply(remedy, remedy.words)}
+    >
+      {remedy.words}
+    </Button>
+  );
+}

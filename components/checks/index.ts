@@ -1,0 +1,2 @@
+export { ChecksPanel } from './checks-panel';
+export { countFindings, needsAttention, verdictWords, WORST_FIRST } from './count-findings';

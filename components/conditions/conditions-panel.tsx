@@ -1,0 +1,59 @@
+'use client';
+
+import { useId, useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
+import { inArc } from './condition-words';
+import { slopeEdit, windEdit } from './condition-edits';
+import { ConditionsForm } from './conditions-form';
+import { ConditionsWords } from './conditions-words';
+import { Dial } from './dial';
+
+/** Wind, slope and soil: the dial, the same in words, and the fields to type them in. */
+export function ConditionsPanel() {
+  const store = useDrawingStore();
+  const conditions = useDrawing((s) => s.sheet.layout.conditions);
+  const arc = useDrawing((s) => s.standsFor);
+  const canDraw = useDrawing((s) => s.canDraw);
+  const [typing, setTyping] = useState(false);
+  const formId = useId();
+  const from = conditions.wind?.from_deg;
+
+  const clear = (which: 'wind' | 'slope'): void => {
+    const { history, apply } = store.getState();
+    const before = history.present.layout.conditions;
+    if (which === 'wind') apply(windEdit(before, { from_deg: null }), 'Wind direction not known');
+    else apply(slopeEdit(before, { down_deg: null }), 'Downhill not known');
+  };
+
+  return (
+    <section aria-label="Conditions" className="px-4 py-3">
+      <div className="grid grid-cols-[minmax(8rem,11rem)_minmax(0,1fr)] gap-4">
+        <Dial
+          conditions={conditions}
+          arc={arc}
+          stands={arc !== null && (from == null || inArc(from, arc))}
+          disabled={!canDraw}
+          onClear={clear}
+        />
+        <div className="flex flex-col justify-between gap-1">
+          <ConditionsWords />
+          {canDraw && (
+            <Button
+              look="quiet"
+              className="pointer-coarse:!min-h-11 !min-h-8 self-start !px-0"
+              aria-expanded={typing}
+              aria-controls={formId}
+              onClick={() => setTyping(!typing)}
+            >
+              {typing ? 'Done typing' : 'Type conditions'}
+            </Button>
+          )}
+        </div>
+      </div>
+      <div id={formId} hidden={!typing}>
+        {typing && <ConditionsForm />}
+      </div>
+    </section>
+  );
+}

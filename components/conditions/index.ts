@@ -1,0 +1,2 @@
+export { ConditionsPanel } from './conditions-panel';
+export { WindChip } from './wind-chip';

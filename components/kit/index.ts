@@ -1,0 +1,1 @@
+export { KitShelf } from './kit-shelf';

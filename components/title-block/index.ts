@@ -1,0 +1,1 @@
+export { TitleBlock } from './title-block';

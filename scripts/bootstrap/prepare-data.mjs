@@ -4,7 +4,7 @@ import { join } from 'node:path';
 import { Refusal } from './refusal.mjs';
 import { tail } from './run.mjs';
 import { step } from './say.mjs';
-import { runTool } from './tool.mjs';
+import { runScript } from './tool.mjs';
 
 /** @typedef {{ name: string, email: string, role: string, password: string }} SignIn */
 
@@ -25,9 +25,7 @@ export async function prepareData(root, env) {
  * @param {string} file
  */
 async function script(root, env, label, file) {
-  // The scripts are server code: under this condition the marker that keeps it out of browsers is quiet.
-  const args = ['--conditions=react-server', file];
-  const { code, output } = await step(label, () => runTool(root, 'tsx', args, { env, live: true }));
+  const { code, output } = await step(label, () => runScript(root, file, { env, live: true }));
   if (code !== 0) {
     throw new Refusal(
       `${label} failed (${file}); nothing was started. If DATABASE_URL is set, check it. This was said:\n${tail(output)}`,

@@ -3,6 +3,8 @@ import { spawn } from 'node:child_process';
 import { mustGoOn, onStop } from './stopping.mjs';
 import { say } from './say.mjs';
 
+const STOPPED_WITHIN_MS = 5_000;
+
 /** @typedef {{ code: number | null, signal: NodeJS.Signals | null, output: string }} Ran */
 
 /**
@@ -17,7 +19,13 @@ export function run(command, args, { cwd, env = process.env, input, live = false
   return new Promise((resolve, reject) => {
     mustGoOn();
     const child = spawn(command, args, { cwd, env, stdio: ['pipe', 'pipe', 'pipe'] });
-    const forget = onStop(() => void child.kill('SIGTERM'));
+    const closed = new Promise((told) => child.once('close', told));
+    const forget = onStop(async () => {
+      child.kill('SIGTERM');
+      const insisting = setTimeout(() => child.kill('SIGKILL'), STOPPED_WITHIN_MS);
+      await closed;
+      clearTimeout(insisting);
+    });
     let output = '';
     let line = '';
     /** @param {string} text */

@@ -1,6 +1,8 @@
 // @ts-check
 import { Refusal } from './refusal.mjs';
 
+const PARENT_LOOKED_AT_MS = 500;
+
 /** @type {(() => Promise<void> | void)[]} */
 const undone = [];
 let stopping = false;
@@ -45,15 +47,20 @@ export async function stopAll() {
 
 /**
  * A first signal stops everything in order; further ones are ignored, because the order is what
- * keeps the database whole and each part of it has its own time limit.
- * @param {(signal: NodeJS.Signals) => Promise<void>} stop
+ * keeps the database whole and each part of it has its own time limit. Under npm, the end of npm
+ * counts as a signal: killed outright, it has no chance to pass one on.
+ * @param {() => Promise<void>} stop
  */
 export function onSignal(stop) {
-  for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) {
-    process.on(signal, () => {
-      if (stopping) return;
-      stopping = true;
-      void stop(signal);
-    });
-  }
+  const once = () => {
+    if (stopping) return;
+    stopping = true;
+    void stop();
+  };
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, once);
+  if (!process.env.npm_lifecycle_event) return;
+  const npm = process.ppid;
+  setInterval(() => {
+    if (process.ppid !== npm) once();
+  }, PARENT_LOOKED_AT_MS).unref();
 }

@@ -4,7 +4,6 @@ import { run } from './run.mjs';
 
 const ENTRY = {
   next: 'next/dist/bin/next',
-  tsx: 'tsx/dist/cli.mjs',
   vitest: 'vitest/vitest.mjs',
   eslint: 'eslint/bin/eslint.js',
   prettier: 'prettier/bin/prettier.cjs',
@@ -33,4 +32,16 @@ export function toolCommand(root, tool, args) {
  */
 export function runTool(root, tool, args, options) {
   return run(...toolCommand(root, tool, args), { cwd: root, ...options });
+}
+
+/**
+ * Runs one of the project's TypeScript scripts in a process of its own, with no other between.
+ * @param {string} root
+ * @param {string} file
+ * @param {{ env: NodeJS.ProcessEnv, live?: boolean }} options
+ */
+export function runScript(root, file, options) {
+  // The scripts are server code: under this condition the marker that keeps it out of browsers is quiet.
+  const args = ['--conditions=react-server', '--import', 'tsx', file];
+  return run(process.execPath, args, { cwd: root, ...options });
 }

@@ -54,6 +54,8 @@ export type Name = {
   /** Direction the words read in; left out, they stand level on the screen. */
   readonly toward_deg?: number;
   readonly weight: 'place' | 'way' | 'thing' | 'water';
+  /** What the words lie on, where that isn't open ground. */
+  readonly on?: Surface | 'building';
   /** Shown at this zoom and closer. */
   readonly from_zoom: number;
 };

@@ -4,12 +4,14 @@ import { tidy, type Pen } from '../pen';
 import type { Prepared } from '../prepare';
 import type { FixedThing, Name } from '../scene';
 
-const STYLE: Record<
-  Name['weight'],
-  { size: number; ink: string; bold?: boolean; spaced?: number; ground?: string }
-> = {
+type Style = { readonly size: number; readonly ink: string } & {
+  readonly bold?: boolean;
+  readonly spaced?: number;
+};
+
+const STYLE: Record<Name['weight'], Style> = {
   place: { size: 18, ink: INKS.name, bold: true, spaced: 1.2 },
-  way: { size: 15, ink: INKS.name, spaced: 1, ground: INKS.asphalt },
+  way: { size: 15, ink: INKS.name, spaced: 1 },
   thing: { size: 14, ink: INKS.thing },
   water: { size: 14, ink: INKS.water, spaced: 0.6 },
 };
@@ -17,7 +19,9 @@ const STYLE: Record<
 export function names({ scene }: Prepared, pen: Pen): string[] {
   return scene.names
     .filter((name) => pen.zoom >= name.from_zoom && pen.shows([name.at]))
-    .map((name) => lettering(pen, { ...name, ...STYLE[name.weight], halo: 4 }));
+    .map((name) =>
+      lettering(pen, { ...name, ...STYLE[name.weight], halo: 4, ground: INKS[name.on ?? 'paper'] }),
+    );
 }
 
 /** What distances are taped from: small, plain, never larger than the plan's own marks. */

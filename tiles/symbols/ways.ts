@@ -13,34 +13,74 @@ const FILL: Record<Surface, string> = {
 type PreparedRoad = Prepared['roads'][number];
 type Stand = Prepared['scene']['hardstands'][number];
 
-/** Everything at ground level opens into one another where it meets; bridges cross over it. */
+/**
+ * Everything loose or rolled opens into one another where it meets; slabs lie on it with an edge
+ * of their own, and bridges cross over it.
+ */
 export function ways({ scene, roads, stones }: Prepared, pen: Pen): string[] {
   const seen = roads.filter((road) => pen.shows(road.line));
   const stands = scene.hardstands.filter((stand) => pen.shows(stand.outline));
+  const slabs = stands.filter((stand) => stand.surface === 'concrete');
   const level = seen.filter((road) => !road.over);
   const bridges = seen.filter((road) => road.over);
   return [
-    ...surfaced(level, stands, pen),
-    ...textures(stands, stones, pen),
-    ...level.flatMap((road) => paint(road, pen)),
+    ...surfaced(
+      level,
+      stands.filter((stand) => stand.surface !== 'concrete'),
+      pen,
+    ),
+    ...pebbles(stones, pen),
+    ...firm(level, pen),
+    ...slabs.flatMap((slab) => drawSlab(slab, pen)),
     ...bridges.flatMap((road) => [...surfaced([road], [], pen), ...paint(road, pen)]),
   ];
 }
 
+const edgePx = (pen: Pen): number => (pen.zoom >= 18 ? 1.2 : 0.8);
+const widePx = (road: PreparedRoad, pen: Pen): number => pen.wide(road.width_ft, 1.5);
+
 /** All edges first, then all surfaces, so that no edge runs across a mouth. */
 function surfaced(roads: readonly PreparedRoad[], stands: readonly Stand[], pen: Pen): string[] {
-  const edge = pen.zoom >= 18 ? 1.2 : 0.8;
-  const wide = (road: PreparedRoad): number => pen.wide(road.width_ft, 1.5);
+  const edge = edgePx(pen) * 2;
   return [
     ...stands.map(({ outline }) =>
-      pen.area(outline, INKS.kerb, { stroke: INKS.kerb, width: edge * 2 }),
+      pen.area(outline, INKS.kerb, { stroke: INKS.kerb, width: edge }),
     ),
     ...roads.map((road) =>
-      pen.line(road.line, { stroke: INKS.kerb, width: wide(road) + edge * 2 }),
+      pen.line(road.line, { stroke: INKS.kerb, width: widePx(road, pen) + edge }),
     ),
     ...stands.map(({ outline, surface }) => pen.area(outline, FILL[surface])),
-    ...roads.map((road) => pen.line(road.line, { stroke: FILL[road.surface], width: wide(road) })),
+    ...roads.map((road) =>
+      pen.line(road.line, { stroke: FILL[road.surface], width: widePx(road, pen) }),
+    ),
   ];
+}
+
+/** Asphalt again, over the gravel that runs up to it, with its paint. */
+function firm(roads: readonly PreparedRoad[], pen: Pen): string[] {
+  const asphalt = roads.filter((road) => road.surface === 'asphalt');
+  return [
+    ...asphalt.map((road) =>
+      pen.line(road.line, { stroke: INKS.asphalt, width: widePx(road, pen) }),
+    ),
+    ...asphalt.flatMap((road) => paint(road, pen)),
+  ];
+}
+
+function drawSlab({ outline }: Stand, pen: Pen): string[] {
+  const slab = pen.area(outline, INKS.concrete, { stroke: INKS.kerb, width: edgePx(pen) });
+  if (pen.zoom < 19) return [slab];
+  const joints = jointsOf(outline);
+  return [slab, ...joints.map((joint) => pen.line(joint, { stroke: INKS.joint, width: 1 }))];
+}
+
+/** Stones tell gravel from paving without colour. */
+function pebbles(stones: readonly Ft[], pen: Pen): string[] {
+  if (pen.zoom < 19) return [];
+  const size = pen.wide(0.14, 0.6);
+  return stones
+    .filter((at, i) => (pen.zoom >= 20 || i % 3 === 0) && pen.shows([at]))
+    .map((at) => pen.disc(at, size, INKS.stone));
 }
 
 /** Ten feet of paint and thirty of gap: the usual broken line of a road. */
@@ -55,20 +95,6 @@ function paint(road: PreparedRoad, pen: Pen): string[] {
       ...(dashed ? { dash: BROKEN_FT.map((ft) => ft * pen.pxPerFt) } : {}),
     }),
   );
-}
-
-/** Stones on gravel and joints in concrete: surfaces told apart without colour. */
-function textures(stands: readonly Stand[], stones: readonly Ft[], pen: Pen): string[] {
-  if (pen.zoom < 19) return [];
-  const size = pen.wide(0.14, 0.6);
-  const scattered = stones.filter((at, i) => (pen.zoom >= 20 || i % 3 === 0) && pen.shows([at]));
-  return [
-    ...scattered.map((at) => pen.disc(at, size, INKS.stone)),
-    ...stands
-      .filter((stand) => stand.surface === 'concrete')
-      .flatMap((stand) => jointsOf(stand.outline))
-      .map((joint) => pen.line(joint, { stroke: INKS.joint, width: 1 })),
-  ];
 }
 
 const JOINT_SPACING_FT = 15;

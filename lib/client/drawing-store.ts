@@ -1,4 +1,5 @@
 import { createStore, type StoreApi } from 'zustand/vanilla';
+import { ROLE_WORDS, whoMay } from '../access';
 import type { LayoutAnswer } from '../api';
 import { firstToFail, runChecks, standsFor } from '../checks';
 import type { Finding, FirstToFail, WindArc } from '../checks';
@@ -104,6 +105,7 @@ export function createDrawingStore(
 ): DrawingStore {
   const first: Sheet = { layout: answer.layout, site: answer.site.ground };
   const canDraw = answer.me.can.includes('layout.draw');
+  const canChangeSite = answer.me.can.includes('site.change');
 
   return createStore<DrawingState>((set, get) => {
     const answers = (sheet: Sheet, limits: Limits, at: string | null): Answers => {
@@ -160,17 +162,19 @@ export function createDrawingStore(
       hovered: null,
       shownFinding: null,
       inHand: null,
-      save: saveState(canDraw ? 'saved' : 'read-only', answer.saved_at),
+      save: saveState(canDraw || canChangeSite ? 'saved' : 'read-only', answer.saved_at),
       canDraw,
-      canChangeSite: answer.me.can.includes('site.change'),
+      canChangeSite,
       announcement: '',
       complaint: null,
 
       apply(edits, label, gesture) {
         const { history } = get();
         try {
-          settle(commit(history, edits, label, gesture), { complaint: null });
-          return true;
+          const next = commit(history, edits, label, gesture);
+          const refused = refusalOf(history.present, next.present, get());
+          settle(refused ? history : next, { complaint: refused });
+          return refused === null;
         } catch (error) {
           if (!(error instanceof EditError)) throw error;
           settle(history, { complaint: error.message });
@@ -223,4 +227,20 @@ export function createDrawingStore(
       load: (sheet, base) => settle(newHistory(sheet), { base, selection: null }),
     };
   });
+}
+
+/** Why this person may not make the change, in words; null where they may. */
+function refusalOf(
+  before: Sheet,
+  after: Sheet,
+  { canDraw, canChangeSite, meta }: DrawingState,
+): string | null {
+  const role = ROLE_WORDS[meta.me.role].toLowerCase();
+  if (before.layout !== after.layout && !canDraw) {
+    return `Nothing was changed: as ${role} you see layouts but do not draw them. Ask ${whoMay('layout.draw')}.`;
+  }
+  if (before.site !== after.site && !canChangeSite) {
+    return `Nothing was changed: as ${role} you do not change the site. Ask ${whoMay('site.change')}.`;
+  }
+  return null;
 }

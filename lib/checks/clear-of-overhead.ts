@@ -1,11 +1,11 @@
-import { insideArea, metresToFeet, nearestOnPath, pathToPath, type Vec } from '../geo';
+import { insideFootprint, metresToFeet, nearestOnPath, pathToPath, type Vec } from '../geo';
 import { OVERHEAD_CLEARANCE, overheadClearanceFeet } from '../limits';
-import { nameOf, piecesOf, placesOf, planeOf, type Layout, type PieceOf } from '../layout';
+import { nameOf, piecesOf, placesOf, planeOf, type PieceOf } from '../layout';
 import { answer, atLeast, measured } from './support/answer';
-import { moveRemedy, nearestPlace } from './support/move';
+import { betterPlaceRemedy } from './support/better-place';
 import { shapeAt, subjectsOf, type Subject } from './support/subjects';
 import { capital, feet, NOT_IN_USE } from './support/words';
-import type { Check, Finding } from './types';
+import type { Check, CheckInput, Finding } from './types';
 
 const rule = { id: 'clear-of-overhead', gate: 'deviation', backing: OVERHEAD_CLEARANCE } as const;
 
@@ -13,7 +13,8 @@ export const clearOfOverhead: Check = {
   ...rule,
   question: 'What is under and over us?',
   title: 'Clear of overhead lines',
-  check({ layout, site }) {
+  check(input) {
+    const { layout, site } = input;
     const lines = piecesOf(site.features, 'overhead-line');
     if (lines.length === 0) {
       return [
@@ -25,11 +26,11 @@ export const clearOfOverhead: Check = {
       ];
     }
     const subjects = subjectsOf(layout, ['rod'], ['C', 'R', 'P']);
-    return subjects.flatMap((subject) => lines.map((line) => judge(layout, subject, line)));
+    return subjects.flatMap((subject) => lines.map((line) => judge(input, subject, line)));
   },
 };
 
-function judge(layout: Layout, subject: Subject, line: PieceOf<'overhead-line'>): Finding {
+function judge(input: CheckInput, subject: Subject, line: PieceOf<'overhead-line'>): Finding {
   const about = [subject.id, line.id];
   if (subject.kind === 'undrawn') {
     return answer(rule, about, 'not-known', `${capital(subject.name)} is not drawn`);
@@ -47,12 +48,12 @@ function judge(layout: Layout, subject: Subject, line: PieceOf<'overhead-line'>)
       { missing: ['voltage'] },
     );
   }
-  const plane = planeOf(layout);
+  const plane = planeOf(input.layout);
   const path = placesOf(plane, line)[0]!;
   const feetFrom = (at: Vec): number => {
     const shape = shapeAt(subject, at);
     if ('x' in shape) return metresToFeet(nearestOnPath(shape, path).metres);
-    return path.some((v) => insideArea(v, [shape])) ? 0 : metresToFeet(pathToPath(shape, path));
+    return path.some((v) => insideFootprint(v, shape)) ? 0 : metresToFeet(pathToPath(shape, path));
   };
   const clear = feetFrom(subject.at);
   const meets = clear >= least;
@@ -64,14 +65,7 @@ function judge(layout: Layout, subject: Subject, line: PieceOf<'overhead-line'>)
     {
       measured: measured(clear, 'ft'),
       allowed: atLeast(least, 'ft'),
-      remedy: meets
-        ? null
-        : moveRemedy(
-            plane,
-            subject,
-            subject.at,
-            nearestPlace(plane, subject.at, (at) => feetFrom(at) >= least),
-          ),
+      remedy: meets ? null : betterPlaceRemedy(input, subject, (at) => feetFrom(at) >= least),
     },
   );
 }

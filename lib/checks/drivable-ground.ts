@@ -2,7 +2,7 @@ import { insideArea } from '../geo';
 import { OUR_DEFAULT } from '../limits';
 import { piecesOf, placesOf, planeOf } from '../layout';
 import { answer } from './support/answer';
-import { moveRemedy, nearestPlace } from './support/move';
+import { betterPlaceRemedy } from './support/better-place';
 import { subjectsOf } from './support/subjects';
 import { capital } from './support/words';
 import type { Check } from './types';
@@ -13,7 +13,8 @@ export const drivableGround: Check = {
   ...rule,
   question: 'Is everything in the right place?',
   title: 'Ground that a rod can be driven into',
-  check({ layout, site }) {
+  check(input) {
+    const { layout, site } = input;
     const plane = planeOf(layout);
     const areas = piecesOf(site.features, 'no-drive').map((area) => ({
       rings: placesOf(plane, area),
@@ -44,15 +45,10 @@ export const drivableGround: Check = {
           subject.role === 'probe' ? 'caution' : 'not-met',
           `${capital(subject.name)} stands on ${under.surface}`,
           {
-            remedy: moveRemedy(
-              plane,
+            remedy: betterPlaceRemedy(
+              input,
               subject,
-              subject.at,
-              nearestPlace(
-                plane,
-                subject.at,
-                (at) => !areas.some(({ rings }) => insideArea(at, rings)),
-              ),
+              (at) => !areas.some(({ rings }) => insideArea(at, rings)),
             ),
           },
         ),

@@ -13,11 +13,12 @@ export const ignitionClear: Check = {
   ...rule,
   question: 'Is everything in the right place?',
   title: 'Pump, tester and receiver clear of the sources',
-  check({ layout, limits }) {
+  check(input) {
+    const { layout, limits } = input;
     const sources = sourcesOf(layout);
     return keptClear({
       rule,
-      layout,
+      input,
       units: ['P', 'R'],
       metresTo: noSources(sources) ? null : (shape) => metresToSource(sources, shape),
       leastFt: limits.values.ignition_clear_ft,

@@ -2,7 +2,7 @@ import { footprintMeetsArea, insideArea, type Area, type Vec } from '../geo';
 import { OUR_DEFAULT } from '../limits';
 import { piecesOf, placesOf, planeOf } from '../layout';
 import { answer } from './support/answer';
-import { moveRemedy, nearestPlace } from './support/move';
+import { betterPlaceRemedy } from './support/better-place';
 import { shapeAt, subjectsOf, type DrawnSubject } from './support/subjects';
 import { capital, NOT_IN_USE } from './support/words';
 import type { Check } from './types';
@@ -14,7 +14,8 @@ export const lowGround: Check = {
   ...rule,
   question: 'Is everything in the right place?',
   title: 'Out of low ground',
-  check({ layout, site }) {
+  check(input) {
+    const { layout, site } = input;
     const plane = planeOf(layout);
     const hollows = piecesOf(site.features, 'low-ground').map((area) => placesOf(plane, area));
     return subjectsOf(layout, ['rod', 'tester'], ['P', 'R']).map((subject) => {
@@ -35,12 +36,7 @@ export const lowGround: Check = {
         'caution',
         `${capital(subject.name)} stands in low ground, where vapour gathers`,
         {
-          remedy: moveRemedy(
-            plane,
-            subject,
-            subject.at,
-            nearestPlace(plane, subject.at, (at) => !low(at)),
-          ),
+          remedy: betterPlaceRemedy(input, subject, (at) => !low(at)),
         },
       );
     });

@@ -2,10 +2,10 @@ import { beyondArea, footprintBeyondArea, metresToFeet, type Area, type Vec } fr
 import { COMMON_PRACTICE } from '../limits';
 import { piecesOf, placesOf, planeOf, type Layout } from '../layout';
 import { answer, atLeast, measured } from './support/answer';
-import { moveRemedy, nearestPlace } from './support/move';
+import { betterPlaceRemedy } from './support/better-place';
 import { shapeAt, subjectsOf, type DrawnSubject } from './support/subjects';
 import { capital, feet, NOT_IN_USE } from './support/words';
-import type { Check, Finding } from './types';
+import type { Check, CheckInput, Finding } from './types';
 
 const rule = { id: 'outside-hot-zone', gate: 'deviation', backing: COMMON_PRACTICE } as const;
 
@@ -13,7 +13,8 @@ export const outsideHotZone: Check = {
   ...rule,
   question: 'Is everything in the right place?',
   title: 'Outside the hot zone',
-  check({ layout, limits }) {
+  check(input) {
+    const { layout, limits } = input;
     const setback = limits.values.zone_setback_ft;
     const zones = hotZones(layout);
     return subjectsOf(layout, ['rod', 'z-probe', 'y-probe', 'tester'], ['P', 'R']).map(
@@ -31,7 +32,7 @@ export const outsideHotZone: Check = {
             missing: ['hot-zone'],
           });
         }
-        return judge(layout, subject, zones, setback, gate);
+        return judge(input, subject, zones, setback, gate);
       },
     );
   },
@@ -48,13 +49,12 @@ export const hotZones = (layout: Layout): Area[] =>
   piecesOf(layout.pieces, 'hot-zone').map((zone) => placesOf(planeOf(layout), zone));
 
 function judge(
-  layout: Layout,
+  input: CheckInput,
   subject: DrawnSubject,
   zones: readonly Area[],
   setback: number,
   gate: Finding['gate'],
 ): Finding {
-  const plane = planeOf(layout);
   const beyondFrom = (at: Vec): { feet: number; inside: boolean } => {
     const shape = shapeAt(subject, at);
     const each = zones.map((zone) =>
@@ -80,12 +80,7 @@ function judge(
       remedy:
         status === 'meets'
           ? null
-          : moveRemedy(
-              plane,
-              subject,
-              subject.at,
-              nearestPlace(plane, subject.at, (at) => beyondFrom(at).feet >= setback),
-            ),
+          : betterPlaceRemedy(input, subject, (at) => beyondFrom(at).feet >= setback),
     },
   );
 }

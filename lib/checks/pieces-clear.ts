@@ -1,4 +1,4 @@
-import { footprintsOverlap, insideArea } from '../geo';
+import { footprintsOverlap, insideFootprint } from '../geo';
 import { OUR_DEFAULT } from '../limits';
 import { footprintOf, nameOf, piecesOf, placeOf, planeOf, systemsInUse, unitOf } from '../layout';
 import { answer, atMost, measured } from './support/answer';
@@ -23,7 +23,7 @@ export const piecesClear: Check = {
       const ring = footprintOf(plane, unit);
       const under = [
         ...units.slice(i + 1).filter((other) => footprintsOverlap(ring, footprintOf(plane, other))),
-        ...rods.filter((rod) => insideArea(placeOf(plane, rod), [ring])),
+        ...rods.filter((rod) => insideFootprint(placeOf(plane, rod), ring)),
       ];
       return under.map((piece) => `${nameOf(piece)} and the ${nameOf(unit)}`);
     });

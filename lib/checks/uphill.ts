@@ -1,9 +1,8 @@
 import { LIMIT_TABLE } from '../limits';
 import { planeOf } from '../layout';
-import type { Vec } from '../geo';
 import { answer, atMost, measured } from './support/answer';
-import { moveRemedy, nearestPlace } from './support/move';
-import { noSources, sourcesOf, worstAngle } from './support/sources';
+import { betterPlaceRemedy } from './support/better-place';
+import { noSources, sourcesOf, worstAngleTo } from './support/sources';
 import { readSlope, wedge } from './support/wind';
 import { capital, degrees, NOT_IN_USE } from './support/words';
 import type { Check, Status } from './types';
@@ -15,7 +14,8 @@ export const uphill: Check = {
   ...rule,
   question: 'Is everything in the right place?',
   title: 'Uphill of every source',
-  check({ layout, limits }) {
+  check(input) {
+    const { layout, limits } = input;
     const plane = planeOf(layout);
     const slope = readSlope(layout, limits);
     const sources = sourcesOf(layout);
@@ -48,7 +48,7 @@ export const uphill: Check = {
           missing: ['source'],
         });
       }
-      const angleFrom = (at: Vec): number => worstAngle(plane, sources, at, slope.uphillDeg);
+      const angleFrom = worstAngleTo(plane, sources, slope.uphillDeg);
       const angle = angleFrom(subject.at);
       const excused = windGoverns || subject.role === 'probe';
       const status: Status = angle <= most ? 'meets' : excused ? 'caution' : 'not-met';
@@ -64,14 +64,9 @@ export const uphill: Check = {
           measured: measured(angle, 'deg'),
           allowed: atMost(most, 'deg'),
           remedy:
-            status === 'meets'
+            status === 'meets' || subject.role === 'probe'
               ? null
-              : moveRemedy(
-                  plane,
-                  subject,
-                  subject.at,
-                  nearestPlace(plane, subject.at, (at) => angleFrom(at) <= most),
-                ),
+              : betterPlaceRemedy(input, subject, (at) => angleFrom(at) <= most),
         },
       );
     });

@@ -1,13 +1,12 @@
-import { LIMIT_TABLE, type Limits } from '../limits';
+import { LIMIT_TABLE } from '../limits';
 import { planeOf, type Layout } from '../layout';
-import type { Vec } from '../geo';
 import { answer, atMost, measured } from './support/answer';
-import { moveRemedy, nearestPlace } from './support/move';
-import { noSources, sourcesOf, worstAngle, type Sources } from './support/sources';
+import { betterPlaceRemedy } from './support/better-place';
+import { noSources, sourcesOf, worstAngleTo, type Sources } from './support/sources';
 import { subjectsOf, type DrawnSubject } from './support/subjects';
 import { readWind, type WindReading } from './support/wind';
 import { capital, degrees, NOT_IN_USE } from './support/words';
-import type { Check, Finding, Status } from './types';
+import type { Check, CheckInput, Finding, Status } from './types';
 
 const rule = { id: 'upwind', gate: 'deviation', backing: LIMIT_TABLE.upwind_max_deg } as const;
 
@@ -17,7 +16,8 @@ export const upwind: Check = {
   ...rule,
   question: 'Is everything in the right place?',
   title: 'Upwind of every source',
-  check({ layout, limits }) {
+  check(input) {
+    const { layout, limits } = input;
     const wind = readWind(layout, limits);
     const sources = sourcesOf(layout);
     return upwindSubjects(layout).map((subject) => {
@@ -44,7 +44,7 @@ export const upwind: Check = {
       if (wind.kind === 'calm') {
         return answer(rule, [subject.id], 'caution', 'Calm: nowhere is upwind, vapour pools');
       }
-      return judge(layout, limits, subject, sources, wind);
+      return judge(input, subject, sources, wind);
     });
   },
 };
@@ -52,16 +52,10 @@ export const upwind: Check = {
 export const upwindSubjects = (layout: Layout) =>
   subjectsOf(layout, ['rod', 'z-probe', 'y-probe', 'tester'], ['P', 'R']);
 
-function judge(
-  layout: Layout,
-  limits: Limits,
-  subject: DrawnSubject,
-  sources: Sources,
-  wind: Blowing,
-): Finding {
-  const plane = planeOf(layout);
+function judge(input: CheckInput, subject: DrawnSubject, sources: Sources, wind: Blowing): Finding {
+  const { layout, limits } = input;
   const most = limits.values.upwind_max_deg;
-  const angleFrom = (at: Vec): number => worstAngle(plane, sources, at, wind.fromDeg);
+  const angleFrom = worstAngleTo(planeOf(layout), sources, wind.fromDeg);
   const angle = angleFrom(subject.at);
   const status: Status =
     angle + wind.swingDeg <= most
@@ -79,14 +73,9 @@ function judge(
       measured: measured(angle, 'deg'),
       allowed: atMost(allowed, 'deg'),
       remedy:
-        status === 'meets'
+        status === 'meets' || subject.role === 'probe'
           ? null
-          : moveRemedy(
-              plane,
-              subject,
-              subject.at,
-              nearestPlace(plane, subject.at, (at) => angleFrom(at) + wind.swingDeg <= most),
-            ),
+          : betterPlaceRemedy(input, subject, (at) => angleFrom(at) + wind.swingDeg <= most),
     },
   );
 }

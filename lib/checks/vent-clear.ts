@@ -10,11 +10,12 @@ export const ventClear: Check = {
   ...rule,
   question: 'Is everything in the right place?',
   title: "Pump and tester clear of the receiver's vents",
-  check({ layout, limits }) {
+  check(input) {
+    const { layout, limits } = input;
     const vents = ventsOf(layout);
     return keptClear({
       rule,
-      layout,
+      input,
       units: ['P'],
       metresTo:
         vents.length === 0

@@ -4,7 +4,7 @@ import {
   beyondArea,
   edgesOf,
   insideArea,
-  nearestEdge,
+  nearestOnPath,
   pathToPath,
   segmentsMeet,
   type Area,
@@ -37,7 +37,17 @@ export function footprint(
 
 /** Metres from the footprint to p, 0 inside. */
 export const footprintToPoint = (ring: Ring, p: Vec): number =>
-  insideArea(p, [ring]) ? 0 : nearestEdge(p, [ring]).metres;
+  insideFootprint(p, ring) ? 0 : nearestOnPath(p, ring).metres;
+
+/** On the edge counts as inside. Rings run clockwise, so inside lies to the right of every edge. */
+export function insideFootprint(p: Vec, ring: Ring): boolean {
+  for (let i = 1; i < ring.length; i++) {
+    const a = ring[i - 1]!;
+    const b = ring[i]!;
+    if ((b.x - a.x) * (p.y - a.y) - (b.y - a.y) * (p.x - a.x) > 0) return false;
+  }
+  return true;
+}
 
 /** True where the two rings share ground; touching is not sharing. Both convex. */
 export function footprintsOverlap(one: Ring, other: Ring): boolean {
@@ -56,7 +66,7 @@ function separatedByAnEdge(ring: Ring, other: Ring): boolean {
 export function footprintMeetsArea(ring: Ring, area: Area): boolean {
   return (
     ring.some((corner) => insideArea(corner, area)) ||
-    area.some((edge) => edge.some((v) => insideArea(v, [ring]) && insideArea(v, area))) ||
+    area.some((edge) => edge.some((v) => insideFootprint(v, ring) && insideArea(v, area))) ||
     edgesOf([ring]).some(([a, b]) => edgesOf(area).some(([c, d]) => segmentsMeet(a, b, c, d)))
   );
 }

@@ -20,13 +20,25 @@ export function nearestOnSegment(p: Vec, a: Vec, b: Vec): { at: Vec; metres: num
 
 /** Nearest point of a path of one vertex or more. An empty path is infinitely far. */
 export function nearestOnPath(p: Vec, path: readonly Vec[]): { at: Vec; metres: number } {
-  let best = { at: p, metres: Infinity };
-  if (path.length === 1 && path[0]) return { at: path[0], metres: distance(p, path[0]) };
+  const first = path[0];
+  if (!first) return { at: p, metres: Infinity };
+  // Plain numbers until the end: this runs for every zone at every frame of a drag.
+  let [bestX, bestY] = [first.x, first.y];
+  let least = (p.x - bestX) ** 2 + (p.y - bestY) ** 2;
   for (let i = 1; i < path.length; i++) {
-    const near = nearestOnSegment(p, path[i - 1]!, path[i]!);
-    if (near.metres < best.metres) best = near;
+    const a = path[i - 1]!;
+    const b = path[i]!;
+    const dx = b.x - a.x;
+    const dy = b.y - a.y;
+    const length2 = dx * dx + dy * dy;
+    let along = length2 === 0 ? 0 : ((p.x - a.x) * dx + (p.y - a.y) * dy) / length2;
+    along = along < 0 ? 0 : along > 1 ? 1 : along;
+    const x = a.x + along * dx;
+    const y = a.y + along * dy;
+    const square = (p.x - x) ** 2 + (p.y - y) ** 2;
+    if (square < least) [least, bestX, bestY] = [square, x, y];
   }
-  return best;
+  return { at: { x: bestX, y: bestY }, metres: Math.sqrt(least) };
 }
 
 export function pathLength(path: readonly Vec[]): number {
@@ -35,12 +47,25 @@ export function pathLength(path: readonly Vec[]): number {
   return metres;
 }
 
+type TurfPolygon = Parameters<typeof booleanPointInPolygon>[1] & { bbox: number[] };
+const asTurf = new WeakMap<Area, TurfPolygon>();
+
 /** Inside the outer ring and in none of the holes; on an edge counts as inside. */
 export function insideArea(p: Vec, area: Area): boolean {
-  return booleanPointInPolygon([p.x, p.y], {
+  let polygon = asTurf.get(area);
+  if (!polygon) asTurf.set(area, (polygon = toTurf(area)));
+  return booleanPointInPolygon([p.x, p.y], polygon);
+}
+
+/** Turf looks at the box first, so that most places outside cost four comparisons. */
+function toTurf(area: Area): TurfPolygon {
+  const outer = area[0] ?? [];
+  const [xs, ys] = [outer.map((v) => v.x), outer.map((v) => v.y)];
+  return {
     type: 'Polygon',
     coordinates: area.map((ring) => ring.map((v) => [v.x, v.y])),
-  });
+    bbox: [Math.min(...xs), Math.min(...ys), Math.max(...xs), Math.max(...ys)],
+  } as TurfPolygon;
 }
 
 /** Metres from p to the nearest edge of the area, holes' edges included, wherever p is. */

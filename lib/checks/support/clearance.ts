@@ -1,14 +1,14 @@
 import { metresToFeet, type Ring, type Vec } from '../../geo';
-import { planeOf, type Layout, type System } from '../../layout';
-import type { Finding, Missing } from '../types';
+import type { System } from '../../layout';
+import type { CheckInput, Finding, Missing } from '../types';
 import { answer, atLeast, measured, type Rule } from './answer';
-import { moveRemedy, nearestPlace } from './move';
+import { betterPlaceRemedy } from './better-place';
 import { shapeAt, subjectsOf } from './subjects';
 import { capital, feet, NOT_IN_USE } from './words';
 
 type Clearance = {
   readonly rule: Rule;
-  readonly layout: Layout;
+  readonly input: CheckInput;
   readonly units: readonly System[];
   /** Metres from a place or footprint to what must be kept clear of; null when that isn't drawn. */
   readonly metresTo: ((shape: Vec | Ring) => number) | null;
@@ -20,8 +20,8 @@ type Clearance = {
 
 /** Whatever can spark, kept a distance from where vapour is: the tester and the units named. */
 export function keptClear(clearance: Clearance): Finding[] {
-  const { rule, layout, units, metresTo, leastFt, what, notDrawn } = clearance;
-  const plane = planeOf(layout);
+  const { rule, input, units, metresTo, leastFt, what, notDrawn } = clearance;
+  const { layout } = input;
   const subjects = subjectsOf(layout, ['tester'], units);
   if (subjects.length === 0) return [answer(rule, [], 'n/a', 'No tester and no pump drawn')];
   return subjects.map((subject) => {
@@ -45,14 +45,7 @@ export function keptClear(clearance: Clearance): Finding[] {
       {
         measured: measured(clear, 'ft'),
         allowed: atLeast(leastFt, 'ft'),
-        remedy: meets
-          ? null
-          : moveRemedy(
-              plane,
-              subject,
-              subject.at,
-              nearestPlace(plane, subject.at, (at) => feetFrom(at) >= leastFt),
-            ),
+        remedy: meets ? null : betterPlaceRemedy(input, subject, (at) => feetFrom(at) >= leastFt),
       },
     );
   });

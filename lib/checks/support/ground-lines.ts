@@ -1,12 +1,14 @@
 import {
+  feetToMetres,
   inchesToMetres,
+  metresToFeet,
   metresToSegment,
   segmentIndex,
   type LocalPlane,
   type SegmentIndex,
   type Vec,
 } from '../../geo';
-import { UNKNOWN_DIAMETER_IN } from '../../limits';
+import { UNKNOWN_DIAMETER_IN, type LimitValues } from '../../limits';
 import { piecesOf, placesOf, type BuriedLine, type PieceOf, type SiteGround } from '../../layout';
 
 /** The site's buried lines, indexed by place; made once for a site and plane. */
@@ -59,6 +61,41 @@ export function linesNear(ground: BuriedLines, at: Vec, within: number): NearLin
     null,
   );
   return nearest ? [nearest] : [];
+}
+
+/** A line nobody has vouched for is taken at the roughest level. */
+export const qualityOf = (line: BuriedLine): 'A' | 'B' | 'C' | 'D' => line.quality ?? 'D';
+
+/** How far the line may be from where it is drawn, by its quality level; feet. */
+export function doubtFt(line: BuriedLine, limits: LimitValues): number {
+  const byLevel = {
+    A: limits.doubt_a_ft,
+    B: limits.doubt_b_ft,
+    C: limits.doubt_c_ft,
+    D: limits.doubt_d_ft,
+  };
+  return byLevel[qualityOf(line)];
+}
+
+/** True where every line is farther than the tolerance and its own doubt. */
+export function clearOfLines(
+  plane: LocalPlane,
+  site: SiteGround,
+  limits: LimitValues,
+  at: Vec,
+): boolean {
+  const widest = Math.max(
+    limits.doubt_a_ft,
+    limits.doubt_b_ft,
+    limits.doubt_c_ft,
+    limits.doubt_d_ft,
+  );
+  // As far as the widest doubt reaches, so that a farther but vaguer line is seen too.
+  const reach = feetToMetres(limits.buried_tolerance_ft + widest);
+  return linesNear(buriedLines(plane, site), at, reach).every(
+    ({ line, metres }) =>
+      metresToFeet(metres) >= limits.buried_tolerance_ft + doubtFt(line, limits),
+  );
 }
 
 /** Everything long and metal along which a test current could run. */

@@ -1,4 +1,4 @@
-import { insideArea, nearestEdge, quantise, type LonLat, type Vec } from '../../geo';
+import { insideFootprint, nearestOnPath, quantise, type LonLat, type Vec } from '../../geo';
 import {
   footprintOf,
   isUnit,
@@ -39,7 +39,7 @@ export function runBetween(
     const goal = placeOf(plane, toward);
     if (!isUnit(piece)) return placeOf(plane, piece);
     const ring = footprintOf(plane, piece);
-    return insideArea(goal, [ring]) ? placeOf(plane, piece) : nearestEdge(goal, [ring]).at;
+    return insideFootprint(goal, ring) ? placeOf(plane, piece) : nearestOnPath(goal, ring).at;
   };
   const path = [end(from, to), end(to, from)].map((at) => quantise(plane.toLonLat(at)));
   return { id, kind, from: from.id, to: to.id, path };

@@ -1,10 +1,11 @@
 import {
-  angleBetween,
   distance,
   distanceToArea,
   footprintMeetsArea,
   footprintToPoint,
   pathToPath,
+  toDegrees,
+  toRadians,
   type Area,
   type LocalPlane,
   type Ring,
@@ -31,19 +32,30 @@ export function sourcesOf(layout: Layout): Sources {
 
 export const noSources = (sources: Sources): boolean => sources.outlets.length === 0;
 
-/** The largest angle, over sources, between the way from the source to `at` and `toward`. */
-export function worstAngle(
+/**
+ * The largest angle, over sources, between the way from the source to a place and `toward`.
+ * Directions are true ones at each source; made once and asked of many places.
+ */
+export function worstAngleTo(
   plane: LocalPlane,
   sources: Sources,
-  at: Vec,
   towardDeg: number,
-): number {
-  return Math.max(
-    ...sources.outlets.map((outlet) =>
+): (at: Vec) => number {
+  const outlets = sources.outlets.map((outlet) => {
+    const turn = toRadians(towardDeg - plane.convergence(outlet));
+    return { outlet, ux: Math.sin(turn), uy: Math.cos(turn) };
+  });
+  return (at) => {
+    let worst = 0;
+    for (const { outlet, ux, uy } of outlets) {
+      const [dx, dy] = [at.x - outlet.x, at.y - outlet.y];
       // Standing on a source is in no direction from it; that is never the right side.
-      distance(outlet, at) === 0 ? 180 : angleBetween(plane.bearing(outlet, at), towardDeg),
-    ),
-  );
+      const angle =
+        dx === 0 && dy === 0 ? Math.PI : Math.abs(Math.atan2(dx * uy - dy * ux, dx * ux + dy * uy));
+      if (angle > worst) worst = angle;
+    }
+    return toDegrees(worst);
+  };
 }
 
 /** Metres from a place or a footprint to the nearest source, 0 inside a pool. */

@@ -16,7 +16,7 @@ export const people: Migration = {
     `CREATE TABLE IF NOT EXISTS people (
       id ${ID} NOT NULL PRIMARY KEY,
       agency_id ${ID} NOT NULL,
-      email VARCHAR(254) NOT NULL,
+      email VARCHAR(254) CHARACTER SET utf8mb4 COLLATE utf8mb4_nopad_bin NOT NULL,
       name VARCHAR(200) NOT NULL,
       password_hash VARCHAR(255) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
       created_at DATETIME(3) NOT NULL,

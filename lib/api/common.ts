@@ -30,3 +30,7 @@ export const label = z
 
 /** Bytes of a request body at most. */
 export const MOST_BYTES = { request: 64 * 1024, layout: 2_000_000, ground: 30_000_000 } as const;
+
+export const siteParams = z.object({ siteId: id });
+export const layoutParams = z.object({ layoutId: id });
+export const versionParams = layoutParams.extend({ version: z.coerce.number().int().min(1) });

@@ -1,0 +1,2 @@
+export { appendAudit, type AuditEntry } from './append';
+export { verifyAudit, type Break } from './verify';

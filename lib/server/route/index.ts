@@ -1,0 +1,1 @@
+export { json, openRoute, route, versionTag } from './route';

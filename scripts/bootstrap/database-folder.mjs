@@ -1,5 +1,14 @@
 // @ts-check
-import { lstatSync, readFileSync, readdirSync, rmSync, writeFileSync, renameSync } from 'node:fs';
+import {
+  lstatSync,
+  mkdirSync,
+  readFileSync,
+  readdirSync,
+  renameSync,
+  rmSync,
+  symlinkSync,
+  writeFileSync,
+} from 'node:fs';
 import { join } from 'node:path';
 import { Refusal } from './refusal.mjs';
 import { run, tail } from './run.mjs';
@@ -71,20 +80,26 @@ function readMarker(folder) {
  * leaves nothing that looks like one.
  * @param {string} folder
  * @param {string} id
- * @param {string} installer the command mariadb-install-db
+ * @param {{ installer: string, plainFolder: string }} by the command mariadb-install-db, and a
+ *   folder whose path has no spaces, because that command can't handle them
  */
-export async function createDatabase(folder, id, installer) {
+export async function createDatabase(folder, id, { installer, plainFolder }) {
   const draft = `${folder}.new`;
   rmSync(draft, { recursive: true, force: true });
+  mkdirSync(draft, { mode: 0o700 });
+  const plainDraft = join(plainFolder, 'new');
+  rmSync(plainDraft, { force: true });
+  symlinkSync(draft, plainDraft);
   const asRoot = process.getuid?.() === 0 ? ['--user=root'] : [];
   const { code, output } = await run(installer, [
     '--no-defaults',
     ...asRoot,
-    `--datadir=${draft}`,
+    `--datadir=${plainDraft}`,
     '--auth-root-authentication-method=normal',
     '--skip-test-db',
     '--skip-name-resolve',
   ]);
+  rmSync(plainDraft, { force: true });
   if (code !== 0) {
     throw new Refusal(
       `The private database could not be made in ${folder}; put right what MariaDB says and run the command again:\n${tail(output)}`,

@@ -1,5 +1,5 @@
 // @ts-check
-import { join } from 'node:path';
+import { dirname, join } from 'node:path';
 import { checkIdentity, createDatabase, databaseIn } from './database-folder.mjs';
 import { startDatabase } from './database-server.mjs';
 import { DATABASE_PACKAGES, findCommand } from './debian-packages.mjs';
@@ -18,13 +18,16 @@ export async function openPrivateDatabase(dataFolder, { port, began } = {}) {
   const found = databaseIn(folder);
   const secrets = keptSecrets(dataFolder, found ?? undefined);
   checkIdentity(folder, found, secrets.databaseId);
-  if (found === null) {
-    await step('Making the private database', () =>
-      createDatabase(folder, secrets.databaseId, commandPath('mariadb-install-db')),
-    );
-  }
   const socket = socketPath(folder);
   ensureSocketFolder(socket);
+  if (found === null) {
+    await step('Making the private database', () =>
+      createDatabase(folder, secrets.databaseId, {
+        installer: commandPath('mariadb-install-db'),
+        plainFolder: dirname(socket),
+      }),
+    );
+  }
   return step('Starting the database', () =>
     startDatabase({
       folder,

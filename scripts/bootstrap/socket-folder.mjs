@@ -7,6 +7,9 @@ import { ensurePrivateFolder } from './data-folder.mjs';
 // Linux gives the name of a local socket 108 bytes, the last of them zero.
 const LONGEST_SOCKET_BYTES = 107;
 
+// MariaDB's own installer is a shell script that loses its way at a space.
+const PLAIN = /^[\w./-]+$/;
+
 /**
  * Where a database's socket goes: short however long the path of the copy is, and the same one
  * only for the same folder and user.
@@ -17,7 +20,7 @@ export function socketPath(databaseFolder, temporary = tmpdir()) {
   const user = process.getuid?.() ?? 0;
   const key = createHash('sha256').update(`${user}:${databaseFolder}`).digest('hex').slice(0, 16);
   const file = join(temporary, `stillground-${key}`, 'db.sock');
-  if (Buffer.byteLength(file) <= LONGEST_SOCKET_BYTES) return file;
+  if (Buffer.byteLength(file) <= LONGEST_SOCKET_BYTES && PLAIN.test(file)) return file;
   return join('/tmp', `stillground-${key}`, 'db.sock');
 }
 

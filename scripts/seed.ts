@@ -1,0 +1,37 @@
+import { db, database, inTransaction } from '../lib/server/database';
+import { demoPlaces } from './seed/demo-places';
+import { seedAgency } from './seed/people';
+import { seedPlace } from './seed/places';
+import { keepSignIns, makeSignIns } from './seed/sign-ins';
+
+/**
+ * Lays the demonstration into an empty database, once: a database that holds an agency is left as
+ * it is. Generated passwords go to demo-sign-ins.json in the folder STILLGROUND_DATA names.
+ */
+async function main(): Promise<void> {
+  if ((await db.Agency.count()) > 0) {
+    process.stdout.write('The database already holds an agency; it is left as it is.\n');
+    return;
+  }
+  const folder = process.env.STILLGROUND_DATA;
+  if (!folder) throw new Error('STILLGROUND_DATA is not set: the demo’s sign-ins need a folder.');
+
+  const signIns = makeSignIns();
+  const places = await demoPlaces();
+  await inTransaction(async (transaction) => {
+    const planner = await seedAgency(signIns, transaction);
+    for (const place of places) await seedPlace(planner, place, transaction);
+    // Before the commit: an agency whose passwords nobody knows could never be entered.
+    await keepSignIns(folder, signIns);
+  });
+  process.stdout.write(`Laid in the demo: ${places.length} sites, ${signIns.length} people.\n`);
+}
+
+main()
+  .catch((error: unknown) => {
+    process.stderr.write(
+      `${error instanceof Error ? (error.stack ?? error.message) : String(error)}\n`,
+    );
+    process.exitCode = 1;
+  })
+  .finally(() => database.close());

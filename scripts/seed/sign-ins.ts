@@ -1,7 +1,6 @@
 import { randomInt } from 'node:crypto';
 import { mkdir, rename, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
-import { ROLE_WORDS } from '../../lib/access';
 import { TEAM } from './team';
 
 export type DemoSignIn = { name: string; email: string; role: string; password: string };
@@ -20,7 +19,7 @@ export const makeSignIns = (): DemoSignIn[] =>
   TEAM.map(({ name, email, role }) => ({
     name,
     email,
-    role: ROLE_WORDS[role],
+    role,
     password: password(),
   }));
 

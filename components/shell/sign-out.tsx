@@ -1,14 +1,20 @@
 'use client';
 
-import { signOut } from 'next-auth/react';
 import { useState } from 'react';
+import { requestSignOut } from '@/components/sign-in/auth-requests';
 
 /** Ends the session on the server, then shows the sign-in. Says so when the server can't be told. */
 export function SignOut() {
   const [state, setState] = useState<'ready' | 'busy' | 'failed'>('ready');
   async function leave() {
     setState('busy');
-    await signOut({ callbackUrl: '/sign-in?after=sign-out' }).catch(() => setState('failed'));
+    try {
+      await requestSignOut();
+      // A full load, so that nothing of this person's stays in memory.
+      window.location.assign('/sign-in?after=sign-out');
+    } catch {
+      setState('failed');
+    }
   }
   return (
     <>

@@ -1,7 +1,6 @@
 'use client';
 
 import { zodResolver } from '@hookform/resolvers/zod';
-import { signIn } from 'next-auth/react';
 import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { z } from 'zod';
@@ -9,6 +8,7 @@ import { Button } from '@/components/ui/button';
 import { Field, Input } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
 import { signInWords } from '@/lib/api/sign-in';
+import { requestSignIn } from './auth-requests';
 import { returnPath } from './return-path';
 
 const entered = z.object({
@@ -19,7 +19,10 @@ const entered = z.object({
 const UNREACHABLE =
   'The server can’t be reached. What you entered is still here: check the network and try again.';
 
-/** `refused` is what next-auth's redirect says of an earlier try. `back` comes from the address and is only followed to a page of this server. */
+/**
+ * `refused` is the code of an earlier refusal, `back` the page asked for; both come from the
+ * address, so the first is only translated and the second only followed to a page of ours.
+ */
 export function SignInForm({ back, refused }: { back: string | null; refused: string | null }) {
   const [refusal, setRefusal] = useState(refused && signInWords(refused));
   const { register, handleSubmit, formState, resetField, setFocus } = useForm({
@@ -29,18 +32,18 @@ export function SignInForm({ back, refused }: { back: string | null; refused: st
 
   const submit = handleSubmit(async ({ email, password }) => {
     setRefusal(null);
-    const answer = await signIn('credentials', { email, password, redirect: false }).catch(
-      () => null,
-    );
-    if (answer?.ok && !answer.error) {
-      // A full load, so that nothing fetched for nobody stays in memory.
-      window.location.assign(returnPath(back, window.location.origin));
-      return;
-    }
-    setRefusal(answer ? signInWords(answer.error ?? 'unknown') : UNREACHABLE);
-    if (answer) {
+    try {
+      const refused = await requestSignIn(email, password);
+      if (refused === null) {
+        // A full load, so that nothing fetched for nobody stays in memory.
+        window.location.assign(returnPath(back, window.location.origin));
+        return;
+      }
+      setRefusal(signInWords(refused));
       resetField('password');
       setFocus('password');
+    } catch {
+      setRefusal(UNREACHABLE);
     }
   });
 

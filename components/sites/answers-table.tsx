@@ -1,0 +1,108 @@
+import { Input, Select } from '@/components/ui/field';
+import { fromLocalEntry, toLocalEntry } from '@/components/ui/local-time';
+import { StatusMark } from '@/components/ui/status-mark';
+import { When } from '@/components/ui/when';
+import { buriedLinesKnown, CLASS_WORDS } from '@/lib/checks/buried-lines-known';
+import { emptyLayout, type AnswerClass, type SiteGround } from '@/lib/layout';
+import { limitsFrom } from '@/lib/limits';
+import type { GroundDraft } from './ground-draft';
+
+type Edit = ((part: Partial<GroundDraft>) => void) | null;
+const ANSWERS = ['marked', 'clear', 'waiting'] as const;
+
+/** One line a class: the check's own answer, so that the site and the drawing never disagree. */
+export function AnswersTable({
+  ground,
+  edit,
+  answers,
+}: {
+  ground: SiteGround;
+  edit: Edit;
+  answers: GroundDraft['answers'];
+}) {
+  // The rule looks at the site alone; what it asks for besides is empty.
+  const findings = buriedLinesKnown.check({
+    layout: emptyLayout([0, 0]),
+    site: ground,
+    limits: limitsFrom(),
+    asOf: null,
+  });
+  return (
+    <table className="w-full border-collapse text-left">
+      <caption className="sr-only">Owners’ answers by class of buried line</caption>
+      <thead className="sr-only">
+        <tr>
+          <th scope="col">Class and what is known</th>
+          <th scope="col">Answered</th>
+        </tr>
+      </thead>
+      <tbody>
+        {findings.map((finding) => {
+          const name = finding.subjects[0] as AnswerClass;
+          return (
+            <tr key={name} className="border-b border-rule-faint align-baseline">
+              <th scope="row" className="py-2 pr-4 font-normal">
+                <StatusMark status={finding.status} className="font-semibold">
+                  {finding.message}
+                </StatusMark>
+              </th>
+              <td className="py-2 text-right max-sm:text-left">
+                {edit ? (
+                  <AnswerEntry
+                    name={name}
+                    ground={ground}
+                    put={(answer) => edit({ answers: { ...answers, [name]: answer } })}
+                  />
+                ) : (
+                  <Answered at={ground.answers[name]?.at} />
+                )}
+              </td>
+            </tr>
+          );
+        })}
+      </tbody>
+    </table>
+  );
+}
+
+const Answered = ({ at }: { at: string | null | undefined }) =>
+  at ? <When at={at} /> : <span className="text-ink-soft">time not entered</span>;
+
+function AnswerEntry({
+  name,
+  ground,
+  put,
+}: {
+  name: AnswerClass;
+  ground: SiteGround;
+  put: (answer: SiteGround['answers'][AnswerClass]) => void;
+}) {
+  const given = ground.answers[name] ?? null;
+  return (
+    <span className="flex flex-wrap justify-end gap-2 max-sm:justify-start">
+      <Select
+        aria-label={`${CLASS_WORDS[name]}: owner’s answer`}
+        className="max-w-40"
+        value={given?.answer ?? ''}
+        onChange={(event) => {
+          const answer = ANSWERS.find((candidate) => candidate === event.target.value);
+          put(answer ? { ...given, answer, at: new Date().toISOString() } : null);
+        }}
+      >
+        <option value="">not asked</option>
+        {ANSWERS.map((answer) => (
+          <option key={answer}>{answer}</option>
+        ))}
+      </Select>
+      {given && (
+        <Input
+          aria-label={`${CLASS_WORDS[name]}: answered at`}
+          className="max-w-56"
+          type="datetime-local"
+          value={toLocalEntry(given.at)}
+          onChange={(event) => put({ ...given, at: fromLocalEntry(event.target.value) })}
+        />
+      )}
+    </span>
+  );
+}

@@ -1,0 +1,57 @@
+'use client';
+
+import 'leaflet/dist/leaflet.css';
+import '@/components/drawing/map/plan-map.css';
+import { MapContainer, ScaleControl, TileLayer } from 'react-leaflet';
+import { Graticule } from '@/components/map-paper/graticule';
+import type { SiteAnswer } from '@/lib/api';
+
+/** Tiles are sharp up to the pack's own zoom and enlarged beyond it. */
+const CLOSEST_ZOOM = 24;
+const ZOOM_WITHOUT_MAP = 17;
+
+/** The site's base map with what is drawn on it; plain paper where there is no map. */
+export function SitePreview({ site }: { site: SiteAnswer }) {
+  const map = site.base_map;
+  if (!map && !site.at) {
+    return (
+      <p className="border border-rule p-4">
+        No position and no base map yet. The drawing still works: it is measured on a plain grid.
+      </p>
+    );
+  }
+  const bounds = map && corners(map.bounds);
+  return (
+    <section aria-label="Map of the site" className="min-w-0">
+      <MapContainer
+        {...(bounds
+          ? { bounds, maxBounds: bounds }
+          : { center: [site.at![1], site.at![0]], zoom: ZOOM_WITHOUT_MAP })}
+        maxZoom={CLOSEST_ZOOM}
+        scrollWheelZoom={false}
+        className="plan-map h-80 border border-ink lg:h-[28rem]"
+      >
+        {map ? (
+          <TileLayer
+            url={`/tiles/${map.pack}/${map.version}/{z}/{x}/{y}`}
+            minZoom={map.min_zoom}
+            maxNativeZoom={map.max_zoom}
+            maxZoom={CLOSEST_ZOOM}
+            bounds={bounds ?? undefined}
+            attribution={map.attribution}
+          />
+        ) : (
+          <Graticule />
+        )}
+        <ScaleControl metric={false} />
+      </MapContainer>
+    </section>
+  );
+}
+
+type Bounds = NonNullable<SiteAnswer['base_map']>['bounds'];
+
+const corners = ([west, south, east, north]: Bounds): [[number, number], [number, number]] => [
+  [south, west],
+  [north, east],
+];

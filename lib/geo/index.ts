@@ -1,5 +1,6 @@
 export * from './angles';
 export * from './footprint';
+export * from './formats';
 export * from './local-plane';
 export * from './planar';
 export * from './position';

@@ -1,6 +1,6 @@
 import { feetToMetres, inchesToMetres, type Vec } from '../geo';
 import { UNKNOWN_DIAMETER_IN } from '../limits';
-import type { BuriedLine, Utility } from '../layout';
+import { placesOf, type BuriedLine, type Utility } from '../layout';
 import type { Frame } from './frame';
 import { wordsAlong } from './line-words';
 import { line, stroke } from './marks';
@@ -36,7 +36,8 @@ const INK_DASHES: Readonly<Record<Utility, readonly number[]>> = {
   sewer: [9, 4],
 };
 
-type Batch = { readonly half: number; readonly lines: Vec[][] };
+type Lines = (readonly Vec[])[];
+type Batch = { readonly half: number; readonly lines: Lines };
 
 /**
  * Lines of one class and doubt are painted as one path: a site may have thousands. Bands lie
@@ -44,10 +45,10 @@ type Batch = { readonly half: number; readonly lines: Vec[][] };
  */
 export function drawBuriedLines(frame: Frame, buried: readonly BuriedLine[]): Group[] {
   const bands = new Map<string, Batch>();
-  const cores = new Map<Utility, Vec[][]>();
+  const cores = new Map<Utility, Lines>();
   const each: Group[] = [];
   for (const piece of buried) {
-    const lines = piece.paths.map((path) => path.map(frame.vec));
+    const lines = placesOf(frame.plane, piece);
     const half = doubtMetres(frame, piece);
     const key = `${piece.utility}|${half.toFixed(3)}`;
     const batch = bands.get(key) ?? { half, lines: [] };
@@ -95,7 +96,7 @@ function band(frame: Frame, key: string, { half, lines }: Batch): Mark {
   );
 }
 
-function core(frame: Frame, utility: Utility, lines: readonly Vec[][]): Mark {
+function core(frame: Frame, utility: Utility, lines: Lines): Mark {
   return frame.inkOnly
     ? line(lines, stroke('ink', 2.5, { dash: INK_DASHES[utility] }))
     : line(lines, stroke(TOKENS[utility], 2.75, { casing: { token: 'casing', width: 5 } }));

@@ -10,6 +10,7 @@ const STEPS = 24;
 export function lying(path: readonly Vec[], part: number): readonly Vec[] {
   const [a, b] = path;
   if (path.length !== 2 || !a || !b) return smooth(path);
+  if (part === 0) return path;
   const side = times(leftOf(subtract(b, a)), part * 2);
   const control = add(between(a, b, 0.5), side);
   return Array.from({ length: STEPS + 1 }, (_, i) => {
@@ -20,7 +21,7 @@ export function lying(path: readonly Vec[], part: number): readonly Vec[] {
   });
 }
 
-/** Catmull-Rom through the vertices, a third of the chord on each side of a vertex. */
+/** Through the vertices, leaving each in the direction of the chord between its neighbours. */
 function smooth(path: readonly Vec[]): readonly Vec[] {
   const out: Vec[] = path.slice(0, 1);
   for (let i = 1; i < path.length; i++) {
@@ -45,18 +46,4 @@ function tangent(before: Vec, after: Vec, chord: number): Vec {
 function bezier(a: Vec, b: Vec, c: Vec, d: Vec, t: number): Vec {
   const [ab, bc, cd] = [between(a, b, t), between(b, c, t), between(c, d, t)];
   return between(between(ab, bc, t), between(bc, cd, t), t);
-}
-
-/** The place `metres` along the path with the direction there; null past its end. */
-export function along(path: readonly Vec[], metres: number): { at: Vec; direction: Vec } | null {
-  let left = metres;
-  for (let i = 1; i < path.length; i++) {
-    const [a, b] = [path[i - 1]!, path[i]!];
-    const length = distance(a, b);
-    if (length > 0 && left <= length) {
-      return { at: between(a, b, left / length), direction: times(subtract(b, a), 1 / length) };
-    }
-    left -= length;
-  }
-  return null;
 }

@@ -1,6 +1,6 @@
-import { localPlane, type LocalPlane, type LonLat, type Vec } from '../geo';
+import type { LocalPlane, LonLat, Vec } from '../geo';
 import type { Limits } from '../limits';
-import type { Sheet } from '../layout';
+import { planeOf, type Sheet } from '../layout';
 import type { LengthUnit, View } from './types';
 
 /** Scale used where nobody says for which the list is drawn: about a letter sheet at 1 in = 20 ft. */
@@ -29,7 +29,7 @@ export type FrameInput = {
 };
 
 export function frameOf({ sheet, limits, units, inkOnly, view = DEFAULT_VIEW }: FrameInput): Frame {
-  const plane = localPlane(sheet.layout.origin);
+  const plane = planeOf(sheet.layout);
   return {
     sheet,
     limits,

@@ -1,6 +1,6 @@
 import { feetToMetres, type Vec } from '../geo';
 import { OVERHEAD_CLEARANCE, overheadClearanceFeet } from '../limits';
-import { piecesOf, type PieceOf, type SiteFeature } from '../layout';
+import { piecesOf, placesOf, type PieceOf, type SiteFeature } from '../layout';
 import { drawBuriedLines } from './buried-lines';
 import type { Frame } from './frame';
 import { hatch } from './hatch';
@@ -23,7 +23,7 @@ export function drawGround(frame: Frame): Group[] {
 }
 
 function noDrive(frame: Frame, area: PieceOf<'no-drive'>): Group {
-  const rings = ringsOf(frame, area);
+  const rings = placesOf(frame.plane, area);
   return areaGroup(area, rings, [
     line(hatch(frame, rings, 45, 11), stroke('rule', 0.9)),
     line(rings, stroke('rule', 1.25), true),
@@ -32,7 +32,7 @@ function noDrive(frame: Frame, area: PieceOf<'no-drive'>): Group {
 
 /** Level strokes, as maps draw wet ground. */
 function lowGround(frame: Frame, area: PieceOf<'low-ground'>): Group {
-  const rings = ringsOf(frame, area);
+  const rings = placesOf(frame.plane, area);
   return areaGroup(area, rings, [
     line(hatch(frame, rings, 0, 8), stroke('water-low', 1, { dash: [10, 6, 4, 6] })),
     line(
@@ -52,7 +52,7 @@ const TIES: Readonly<Record<NonNullable<PieceOf<'metal-line'>['what']>, string>>
 };
 
 function metalLine(frame: Frame, metal: PieceOf<'metal-line'>): Group {
-  const path = metal.path.map(frame.vec);
+  const path = placesOf(frame.plane, metal)[0] ?? [];
   const look =
     metal.what === 'rail'
       ? [stroke('steel', 6, { dash: [1.5, 9] }), stroke('steel', 2)]
@@ -72,7 +72,7 @@ function metalLine(frame: Frame, metal: PieceOf<'metal-line'>): Group {
 
 /** The wires as a dash-dot line, the ground to keep clear of as a band on each side. */
 function overheadLine(frame: Frame, overhead: PieceOf<'overhead-line'>): Group {
-  const path = overhead.path.map(frame.vec);
+  const path = placesOf(frame.plane, overhead)[0] ?? [];
   const known = overhead.volts === undefined ? null : overheadClearanceFeet(overhead.volts);
   const clear = known ?? OVERHEAD_CLEARANCE.unknownDrawnFeet;
   const volts = overhead.volts === undefined ? 'VOLTAGE NOT KNOWN' : voltWords(overhead.volts);
@@ -91,11 +91,11 @@ function overheadLine(frame: Frame, overhead: PieceOf<'overhead-line'>): Group {
 const voltWords = (volts: number): string =>
   volts >= 1000 ? `${Number((volts / 1000).toFixed(1))} kV` : `${volts} V`;
 
-const ringsOf = (frame: Frame, area: { rings: SiteRings }): Vec[][] =>
-  area.rings.map((ring) => ring.map(frame.vec));
-type SiteRings = PieceOf<'no-drive'>['rings'];
-
-const areaGroup = (area: SiteFeature, rings: Vec[][], marks: Mark[]): Group => ({
+const areaGroup = (
+  area: SiteFeature,
+  rings: readonly (readonly Vec[])[],
+  marks: Mark[],
+): Group => ({
   id: area.id,
   layer: 'ground',
   hit: { type: 'area', rings, nearPx: 6, edge: true },

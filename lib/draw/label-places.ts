@@ -1,5 +1,6 @@
 import type { Ring, Vec } from '../geo';
-import type { Frame } from './frame';
+import type { Box, Clutter } from './clutter';
+import { leastCost } from './least-cost';
 import { words } from './marks';
 import { textWidth } from './text-width';
 import type { Token } from './themes';
@@ -13,48 +14,48 @@ export type Wanted = {
   /** How far the symbol reaches from its place, px. */
   readonly reach: number;
   readonly token: Token;
-  /** True outline of a unit; its label stands beside it. */
+  /** True outline of a unit; its label stands beside one of its sides. */
   readonly ring: Ring | null;
 };
 
-type Box = { readonly x: number; readonly y: number; readonly w: number; readonly h: number };
-
-/** Where labels go, best first: beside, then above and below. */
+/** Eight places round a symbol, the ones a reader expects first. */
 const SIDES: readonly Px[] = [
   { x: 1, y: 0 },
-  { x: 0.8, y: -0.8 },
-  { x: 0.8, y: 0.8 },
+  { x: 0.75, y: -0.75 },
+  { x: 0.75, y: 0.75 },
   { x: -1, y: 0 },
-  { x: -0.8, y: -0.8 },
-  { x: -0.8, y: 0.8 },
+  { x: -0.75, y: -0.75 },
+  { x: -0.75, y: 0.75 },
   { x: 0, y: -1 },
   { x: 0, y: 1 },
 ];
-const GAP_PX = 5;
+const GAP_PX = 4;
+/** A place further down the list must spare this much of what it would cover. */
+const RANK_COST = 4;
 
-/** Tries eight places round each piece and takes the one that covers least. */
+type Place = { readonly offset: Px; readonly box: Box; readonly cost: number };
+
+/** Puts each label, in the order given, where it covers least, and counts it as clutter then. */
 export function placeLabels(
-  frame: Frame,
+  clutter: Clutter,
   wanted: readonly Wanted[],
 ): { id: string; mark: TextMark }[] {
-  const taken: Box[] = wanted.filter((w) => w.ring === null).map((w) => symbolBox(frame, w));
   return wanted.map((label) => {
-    const width = textWidth(label.text, label.size, 600);
-    const height = label.size * 1.2;
-    let best: { offset: Px; box: Box; cost: number } | null = null;
-    SIDES.forEach((side, rank) => {
-      const offset = offsetFor(frame, label, side, width, height);
+    const size = { x: textWidth(label.text, label.size, 600), y: label.size * 1.15 };
+    const at = clutter.toPx(label.at);
+    const offsets = label.ring
+      ? besideRing(clutter, label.ring, at, size)
+      : besideSymbol(label, size);
+    const { offset, box } = leastCost(offsets, RANK_COST, (candidate): Place => {
       const box = {
-        x: label.at.x / frame.view.metresPerPx + offset.x - width / 2,
-        y: -label.at.y / frame.view.metresPerPx + offset.y - height / 2,
-        w: width,
-        h: height,
+        x: at.x + candidate.x - size.x / 2,
+        y: at.y + candidate.y - size.y / 2,
+        w: size.x,
+        h: size.y,
       };
-      const cost = rank + taken.reduce((sum, other) => sum + overlap(box, other), 0);
-      if (!best || cost < best.cost) best = { offset, box, cost };
+      return { offset: candidate, box, cost: clutter.cost(box) };
     });
-    const { offset, box } = best!;
-    taken.push(box);
+    clutter.addBox(box);
     return {
       id: label.id,
       mark: words(label.at, label.text, label.size, { token: label.token, offset }),
@@ -62,33 +63,34 @@ export function placeLabels(
   });
 }
 
-function offsetFor(frame: Frame, label: Wanted, side: Px, width: number, height: number): Px {
-  const reach = label.ring ? ringReach(frame, label, side) : label.reach;
-  const out = reach + GAP_PX;
-  return {
-    x: side.x === 0 ? 0 : Math.sign(side.x) * (out * Math.abs(side.x) + width / 2),
-    y: side.y === 0 ? 0 : Math.sign(side.y) * (out * Math.abs(side.y) + height / 2),
-  };
-}
-
-/** How far the unit's outline reaches from its centre towards that side, px. */
-function ringReach(frame: Frame, label: Wanted, side: Px): number {
-  return Math.max(
-    ...label.ring!.map(
-      (v) => ((v.x - label.at.x) * side.x - (v.y - label.at.y) * side.y) / frame.view.metresPerPx,
-    ),
+/** Close to the symbol, then once more a little further out. */
+const besideSymbol = ({ reach }: Wanted, size: Px): Px[] =>
+  [GAP_PX, GAP_PX + 12].flatMap((gap) =>
+    SIDES.map(({ x, y }) => ({
+      x: x * (reach + gap) + (Math.sign(x) * size.x) / 2,
+      y: y * (reach + gap) + (Math.sign(y) * size.y) / 2,
+    })),
   );
-}
 
-const symbolBox = (frame: Frame, { at, reach }: Wanted): Box => ({
-  x: at.x / frame.view.metresPerPx - reach,
-  y: -at.y / frame.view.metresPerPx - reach,
-  w: reach * 2,
-  h: reach * 2,
-});
-
-function overlap(a: Box, b: Box): number {
-  const w = Math.min(a.x + a.w, b.x + b.w) - Math.max(a.x, b.x);
-  const h = Math.min(a.y + a.h, b.y + b.h) - Math.max(a.y, b.y);
-  return w > 0 && h > 0 ? w * h : 0;
+/** Along the two long sides from the middle outwards, then at the ends. */
+function besideRing(clutter: Clutter, ring: Ring, at: Px, size: Px): Px[] {
+  const [fl, fr, rr, rl] = ring.map((v) => clutter.toPx(v));
+  if (!fl || !fr || !rr || !rl) return [{ x: 0, y: 0 }];
+  const long = [0.5, 0.35, 0.65, 0.2, 0.8, 0.05];
+  const sides: readonly (readonly [Px, Px, readonly number[]])[] = [
+    [fr, rr, long],
+    [rl, fl, long],
+    [rr, rl, [0.5]],
+    [fl, fr, [0.5]],
+  ];
+  return sides.flatMap(([a, b, parts]) => {
+    const length = Math.hypot(b.x - a.x, b.y - a.y) || 1;
+    // The ring runs clockwise, so its outside lies to the left of each side: y counts down here.
+    const out = { x: (b.y - a.y) / length, y: -(b.x - a.x) / length };
+    const reach = GAP_PX + 2 + (Math.abs(out.x) * size.x + Math.abs(out.y) * size.y) / 2;
+    return parts.map((part) => ({
+      x: a.x + (b.x - a.x) * part + out.x * reach - at.x,
+      y: a.y + (b.y - a.y) * part + out.y * reach - at.y,
+    }));
+  });
 }

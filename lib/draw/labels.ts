@@ -1,24 +1,50 @@
 import { meanOf, type Vec } from '../geo';
-import type { Piece } from '../layout';
-import { placeLabels, type Wanted } from './label-places';
+import { footprintOf, type Piece } from '../layout';
+import type { Clutter } from './clutter';
 import type { Frame } from './frame';
+import { placeLabels, type Wanted } from './label-places';
 import { sheetName } from './names';
 import { ROD_RADIUS_PX, Y_RADIUS_PX, Z_RADIUS_PX } from './points';
-import type { SheetInput } from './sheet';
 import type { Group } from './types';
-import { PUMP_RADIUS_PX, unitRing } from './units';
+import { PUMP_RADIUS_PX } from './units';
 
 const SIZE_PX = 15;
 
-/** A label for every piece that has a name, set where it covers least. */
-export function labelGroups(frame: Frame, _input: SheetInput): Group[] {
+/** Rods first: theirs is the label a crew looks for. */
+const ORDER: readonly Piece['kind'][] = [
+  'rod',
+  'z-probe',
+  'y-probe',
+  'release-point',
+  'fixed-point',
+];
+
+/** A label for every piece that has a name and is seen. */
+export function drawLabels(frame: Frame, clutter: Clutter): Group[] {
   const { layout, site } = frame.sheet;
-  const wanted = [...layout.pieces, ...site.features].flatMap((piece): Wanted[] => {
-    const text = sheetName(piece, layout, site);
-    const seat = text === null ? null : seatOf(frame, piece);
-    return text === null || seat === null ? [] : [{ id: piece.id, text, size: SIZE_PX, ...seat }];
-  });
-  return placeLabels(frame, wanted).map(({ id, mark }) => ({ id, layer: 'label', marks: [mark] }));
+  const wanted = [...layout.pieces, ...site.features]
+    .flatMap((piece): { rank: number; label: Wanted }[] => {
+      const seat = seatOf(frame, piece);
+      const text = seat && isSeen(frame, seat.at) ? sheetName(piece, layout, site) : null;
+      if (!seat || !text) return [];
+      const rank = ORDER.indexOf(piece.kind);
+      const label = { id: piece.id, text: short(text), size: SIZE_PX, ...seat };
+      return [{ rank: rank < 0 ? ORDER.length : rank, label }];
+    })
+    .sort((a, b) => a.rank - b.rank)
+    .map(({ label }) => label);
+  return placeLabels(clutter, wanted).map(({ id, mark }) => ({
+    id,
+    layer: 'label',
+    marks: [mark],
+  }));
+}
+
+function isSeen({ view: { bounds } }: Frame, at: Vec): boolean {
+  return (
+    !bounds ||
+    (at.x >= bounds.min.x && at.x <= bounds.max.x && at.y >= bounds.min.y && at.y <= bounds.max.y)
+  );
 }
 
 const RADIUS_PX: Partial<Record<Piece['kind'], number>> = {
@@ -33,17 +59,16 @@ const RADIUS_PX: Partial<Record<Piece['kind'], number>> = {
   note: 8,
 };
 
+type Seat = Pick<Wanted, 'at' | 'reach' | 'token' | 'ring'>;
+
 /** Where the label's piece lies and how far its symbol reaches from there. */
-function seatOf(
-  frame: Frame,
-  piece: Piece,
-): Pick<Wanted, 'at' | 'reach' | 'token' | 'ring'> | null {
+function seatOf(frame: Frame, piece: Piece): Seat | null {
   const token = piece.kind === 'release-point' || piece.kind === 'pool' ? 'alarm' : 'ink';
   if (piece.kind === 'casualty-vehicle' || piece.kind === 'receiving-vehicle') {
-    return { at: frame.vec(piece.at), reach: 0, token, ring: unitRing(frame, piece) };
+    return { at: frame.vec(piece.at), reach: 0, token, ring: footprintOf(frame.plane, piece) };
   }
   if (piece.kind === 'pool') {
-    const at: Vec | null = meanOf((piece.rings[0] ?? []).slice(1).map(frame.vec));
+    const at = meanOf((piece.rings[0] ?? []).slice(1).map(frame.vec));
     return at && { at, reach: -8, token, ring: null };
   }
   const reach = RADIUS_PX[piece.kind];
@@ -51,3 +76,8 @@ function seatOf(
     ? null
     : { at: frame.vec(piece.at), reach, token, ring: null };
 }
+
+/** Notes are written out in the tables; on the plan they must not bury it. */
+const MOST_CHARACTERS = 34;
+const short = (text: string): string =>
+  text.length <= MOST_CHARACTERS ? text : `${text.slice(0, MOST_CHARACTERS - 1).trimEnd()}…`;

@@ -1,11 +1,11 @@
-import { distance, pathLength, type Vec } from '../geo';
-import { along } from './curves';
+import { distance, type Vec } from '../geo';
 import type { Frame } from './frame';
 import { words } from './marks';
 import { textWidth } from './text-width';
 import type { Token } from './themes';
 import type { TextMark } from './types';
 import { readableTurn } from './vectors';
+import { walk, type Footing, type Walk } from './walk';
 
 const SIZE_PX = 14;
 /** One word about every so many px, the first where a short line still carries one. */
@@ -21,35 +21,28 @@ export function wordsAlong(
   path: readonly Vec[],
   text: string,
   token: Token,
-  size = SIZE_PX,
 ): TextMark[] {
-  const length = pathLength(path);
-  const wide = frame.metres(textWidth(text, size, 600) + 12);
-  if (length < wide * 1.4) return [];
-  const count = Math.min(MOST_WORDS, Math.max(1, Math.round(length / frame.metres(EVERY_PX))));
-  return Array.from({ length: count }, (_, i) => {
-    const middle = ((i + 0.5) * length) / count;
-    return straightPlace(path, middle, wide, length / count / 2);
-  }).flatMap((place) =>
-    place ? [words(place.at, text, size, { token, turnDeg: readableTurn(place.direction) })] : [],
+  const way = walk(path);
+  const wide = frame.metres(textWidth(text, SIZE_PX, 600) + 12);
+  if (way.metres < wide * 1.4) return [];
+  const count = Math.min(MOST_WORDS, Math.max(1, Math.round(way.metres / frame.metres(EVERY_PX))));
+  return Array.from({ length: count }, (_, i) =>
+    straightPlace(way, ((i + 0.5) * way.metres) / count, wide, way.metres / count / 2),
+  ).flatMap((place) =>
+    place
+      ? [words(place.at, text, SIZE_PX, { token, turnDeg: readableTurn(place.direction) })]
+      : [],
   );
 }
 
 /** The nearest place to `middle` within `reach` where the path runs straight for `wide` metres. */
-function straightPlace(
-  path: readonly Vec[],
-  middle: number,
-  wide: number,
-  reach: number,
-): { at: Vec; direction: Vec } | null {
+function straightPlace(way: Walk, middle: number, wide: number, reach: number): Footing | null {
   for (let step = 0; step <= 6; step++) {
     for (const side of step === 0 ? [0] : [1, -1]) {
       const centre = middle + (side * step * reach) / 7;
-      const [from, to] = [along(path, centre - wide / 2), along(path, centre + wide / 2)];
-      const at = along(path, centre);
-      if (!from || !to || !at) continue;
-      const chord = distance(from.at, to.at);
-      if (chord > wide * 0.985) return at;
+      const [from, to] = [way.at(centre - wide / 2), way.at(centre + wide / 2)];
+      const at = way.at(centre);
+      if (from && to && at && distance(from.at, to.at) > wide * 0.985) return at;
     }
   }
   return null;

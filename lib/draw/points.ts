@@ -1,4 +1,4 @@
-import type { PieceOf, Probe, Rod } from '../layout';
+import { placesOf, type PieceOf, type Probe, type Rod } from '../layout';
 import type { Frame } from './frame';
 import { fill, glyph, line, pxDisc, pxLine, stroke } from './marks';
 import type { Group, PxShape } from './types';
@@ -164,7 +164,7 @@ export function drawNote(frame: Frame, note: PieceOf<'note'>): Group {
 }
 
 export function drawPool(frame: Frame, pool: PieceOf<'pool'>): Group {
-  const rings = pool.rings.map((ring) => ring.map(frame.vec));
+  const rings = placesOf(frame.plane, pool);
   return {
     id: pool.id,
     layer: 'zone',

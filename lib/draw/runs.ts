@@ -1,4 +1,4 @@
-import type { Run } from '../layout';
+import { placesOf, type Run } from '../layout';
 import { lying } from './curves';
 import type { Frame } from './frame';
 import { line, stroke } from './marks';
@@ -32,7 +32,7 @@ const LOOKS: Readonly<Record<Run['kind'], RunLook>> = {
 
 export function drawRun(frame: Frame, run: Run): Group {
   const look = LOOKS[run.kind];
-  const path = lying(run.path.map(frame.vec), look.bow);
+  const path = lying(placesOf(frame.plane, run)[0] ?? [], look.bow);
   return {
     id: run.id,
     layer: 'run',

@@ -1,8 +1,13 @@
 import type { Finding } from '../checks';
 import { isRun, isUnit, type Piece } from '../layout';
+import { clutterOf } from './clutter-of';
+import { drawDimensions } from './dimensions';
+import { drawFocus, drawRemedies } from './focus';
 import { frameOf, type Frame, type FrameInput } from './frame';
 import { drawGround } from './ground';
-import { labelGroups } from './labels';
+import { drawLabels } from './labels';
+import { drawStatuses } from './status';
+import { drawTestLines, testLines } from './test-lines';
 import {
   drawNote,
   drawPool,
@@ -25,7 +30,8 @@ export type SheetInput = FrameInput & {
 
 /** The whole sheet: the site's ground with the layout on it. */
 export function drawSheet(input: SheetInput): DisplayList {
-  return joined(drawSite(input), drawLayout(input));
+  const ground = drawSite(input);
+  return joined(ground, drawLayout(input, ground));
 }
 
 /** Only what the site holds: it stays while a piece is dragged, so it can be kept as a picture. */
@@ -33,12 +39,28 @@ export function drawSite(input: FrameInput): DisplayList {
   return inOrder(drawGround(frameOf(input)));
 }
 
-/** Only what the layout holds, with labels, findings and dimensions. */
-export function drawLayout(input: SheetInput): DisplayList {
+/** Only what the layout holds, with findings, dimensions and labels that keep off `ground`. */
+export function drawLayout(input: SheetInput, ground?: DisplayList): DisplayList {
   const frame = frameOf(input);
-  return inOrder([
+  const { findings = [], selection = null, hovered = null } = input;
+  const focus = [selection, hovered].filter((id) => id !== null);
+  const tests = testLines(frame);
+  const pieces = [
     ...frame.sheet.layout.pieces.flatMap((piece) => drawPiece(frame, piece)),
-    ...labelGroups(frame, input),
+    ...drawTestLines(tests),
+  ];
+  // What is told comes before what is named: labels yield to dimensions and status shapes.
+  const clutter = clutterOf(frame, pieces, ground?.groups ?? []);
+  const told = [
+    ...drawStatuses(frame, pieces, findings, clutter),
+    ...drawRemedies(frame, findings, focus),
+    ...drawDimensions(frame, { findings, focus, tests }, clutter),
+  ];
+  return inOrder([
+    ...pieces,
+    ...drawFocus(pieces, selection, hovered),
+    ...told,
+    ...drawLabels(frame, clutter),
   ]);
 }
 

@@ -1,5 +1,5 @@
-import { footprint, feetToMetres, type Ring, type Vec } from '../geo';
-import { unitSizeFt, type Unit } from '../layout';
+import type { Ring, Vec } from '../geo';
+import { footprintOf, type Unit } from '../layout';
 import type { Frame } from './frame';
 import { fill, glyph, line, pxDisc, pxLine, stroke } from './marks';
 import type { Group, Mark } from './types';
@@ -12,7 +12,7 @@ const CAB_MOST = 3;
 export const PUMP_RADIUS_PX = 13;
 
 export function drawUnit(frame: Frame, unit: Unit): Group {
-  const ring = unitRing(frame, unit);
+  const ring = footprintOf(frame.plane, unit);
   return {
     id: unit.id,
     layer: 'piece',
@@ -25,17 +25,6 @@ export function drawUnit(frame: Frame, unit: Unit): Group {
         ? pumpMarks(frame.vec(unit.at), ring, unit.heading_deg ?? 0)
         : vehicleMarks(ring, unit.kind === 'casualty-vehicle'),
   };
-}
-
-export function unitRing(frame: Frame, unit: Unit): Ring {
-  const { length, width } = unitSizeFt(unit);
-  return footprint(
-    frame.plane,
-    frame.vec(unit.at),
-    unit.heading_deg ?? 0,
-    feetToMetres(length),
-    feetToMetres(width),
-  );
 }
 
 function vehicleMarks([fl, fr, rr, rl]: Ring, casualty: boolean): Mark[] {

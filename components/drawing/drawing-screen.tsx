@@ -8,9 +8,7 @@ import { createViewStore, ViewContext } from './map/view-store';
 import { DrawingSheet } from './sheet/drawing-sheet';
 
 export function DrawingScreen({ answer }: { answer: LayoutAnswer }) {
-  const [store] = useState(() =>
-    createDrawingStore(answer, { asOf: new Date().toISOString() }),
-  );
+  const [store] = useState(() => createDrawingStore(answer, { asOf: new Date().toISOString() }));
   const [views] = useState(createViewStore);
   return (
     <DrawingContext value={store}>

@@ -20,8 +20,7 @@ export default function DrawingMap() {
   const store = useDrawingStore();
   const baseMap = useDrawing((state) => state.meta.baseMap);
   const firstBounds = useMemo(
-    () =>
-      placesToShow(store.getState().sheet).map(([lon, lat]): [number, number] => [lat, lon]),
+    () => placesToShow(store.getState().sheet).map(([lon, lat]): [number, number] => [lat, lon]),
     [store],
   );
   return (

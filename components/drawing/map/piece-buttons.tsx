@@ -1,12 +1,12 @@
 'use client';
 
-import { memo, useMemo, type KeyboardEvent } from 'react';
+import { memo, useMemo } from 'react';
 import type { Finding } from '@/lib/checks';
 import { distance, type LocalPlane, type Vec } from '@/lib/geo';
 import { findPiece, placesOf, type Piece, type Sheet } from '@/lib/layout';
+import type { Under } from '@/lib/client/tools';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
 import { pieceSentence, worstFinding } from '../piece-words';
-import { useMoveByKeys } from '../use-move-by-keys';
 import type { PlanView } from './plan-view';
 import { useViewStore } from './view-store';
 
@@ -24,7 +24,6 @@ export function PieceButtons({ plane, view }: { plane: LocalPlane; view: PlanVie
   const selection = useDrawing((state) => state.selection);
   const store = useDrawingStore();
   const views = useViewStore();
-  const onKeyDown = useMoveByKeys();
 
   const pieces = useMemo(
     () => [...sheet.layout.pieces, ...featuresInView(sheet, plane, view)],
@@ -54,7 +53,6 @@ export function PieceButtons({ plane, view }: { plane: LocalPlane; view: PlanVie
             bringIntoView(piece.id);
           }}
           onBlur={() => store.getState().hover(null)}
-          onKeyDown={(event) => onKeyDown(event, piece.id)}
         />
       ))}
     </div>
@@ -73,7 +71,6 @@ const PieceButton = memo(
     onSelect,
     onFocus,
     onBlur,
-    onKeyDown,
   }: {
     piece: Piece;
     name: string;
@@ -82,18 +79,17 @@ const PieceButton = memo(
     onSelect: () => void;
     onFocus: () => void;
     onBlur: () => void;
-    onKeyDown: (event: KeyboardEvent) => void;
   }) {
     return (
       <button
         type="button"
         data-piece={piece.id}
+        data-under={JSON.stringify({ type: 'piece', id: piece.id } satisfies Under)}
         aria-label={name}
         aria-pressed={selected}
         onClick={onSelect}
         onFocus={onFocus}
         onBlur={onBlur}
-        onKeyDown={onKeyDown}
         style={{ left: at.x - HALF_PX, top: at.y - HALF_PX }}
         className="absolute size-11"
       />

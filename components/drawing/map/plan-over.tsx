@@ -1,30 +1,50 @@
 'use client';
 
-import { useMemo } from 'react';
-import type { LocalPlane } from '@/lib/geo';
+import { useCallback, useMemo } from 'react';
+import { useMap } from 'react-leaflet';
+import { handleAt, handlesOf } from '@/lib/client/handles';
+import { piecesAt, REACH_PX } from '@/lib/client/hit-test';
+import { guideOf, type Under } from '@/lib/client/tools';
+import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
 import { drawLayout, drawSite, joined } from '@/lib/draw';
-import { emptyLayout } from '@/lib/layout';
-import { useDrawing } from '@/lib/client/use-drawing';
+import type { LocalPlane } from '@/lib/geo';
+import { emptyLayout, findPiece, isSiteKind } from '@/lib/layout';
 import { useTheme } from '@/components/ui/use-theme';
+import { pieceName } from '../piece-words';
 import { GlideWith } from './glide-with';
+import { handList, jumperBand } from './hand-list';
+import { HandleButtons } from './handle-buttons';
 import { PieceButtons } from './piece-buttons';
 import { PlanStage } from './plan-stage';
 import { PlanWords } from './plan-words';
 import { onlyWords, withoutWords } from './split-list';
-import { useView } from './view-store';
+import { usePlanKeys } from './use-plan-keys';
+import { usePlanPointer } from './use-plan-pointer';
+import { sceneOf, usePlanTool } from './use-plan-tool';
+import { useView, useViewStore } from './view-store';
 
 const NOTHING = { groups: [] };
+/** Handles are small; a mouse may miss them by this much, px. */
+const HANDLE_REACH_PX = 10;
 
 /** Everything drawn over the tiles, from one display list: shapes on canvas, words as SVG. */
 export function PlanOver({ plane }: { plane: LocalPlane }) {
+  const map = useMap();
+  const store = useDrawingStore();
+  const views = useViewStore();
   const theme = useTheme();
   const view = useView((state) => state.atRest);
-  const { site, layout } = useDrawing((state) => state.sheet);
-  const { origin } = layout;
+  const sheet = useDrawing((state) => state.sheet);
   const limits = useDrawing((state) => state.limits);
   const findings = useDrawing((state) => state.findings);
   const selection = useDrawing((state) => state.selection);
   const hovered = useDrawing((state) => state.hovered);
+  const mayDraw = useDrawing((state) => state.canDraw);
+  const mayChangeSite = useDrawing((state) => state.canChangeSite);
+  const moving = useDrawing((state) => state.preview !== null);
+  const tool = usePlanTool();
+  const { site, layout } = sheet;
+  const { origin } = layout;
 
   const frame = useMemo(
     () => view && { metresPerPx: view.metresPerPx, bounds: view.bounds },
@@ -33,27 +53,67 @@ export function PlanOver({ plane }: { plane: LocalPlane }) {
   const ground = useMemo(
     () =>
       // Of the layout the ground needs only the origin: a moving piece must not draw it anew.
-      frame ? drawSite({ sheet: { layout: emptyLayout(origin), site }, limits, view: frame }) : NOTHING,
+      frame
+        ? drawSite({ sheet: { layout: emptyLayout(origin), site }, limits, view: frame })
+        : NOTHING,
     [site, origin, limits, frame],
   );
   const plan = useMemo(
     () =>
       frame
-        ? drawLayout({ sheet: { layout, site }, limits, view: frame, findings, selection, hovered })
+        ? drawLayout({ sheet, limits, view: frame, findings, selection, hovered }, ground)
         : NOTHING,
-    [layout, site, limits, frame, findings, selection, hovered],
+    [sheet, limits, frame, findings, selection, hovered, ground],
   );
+
+  const selected = selection === null ? null : findPiece(sheet, selection);
+  const handles = useMemo(() => {
+    if (!selected || !frame) return [];
+    const may = isSiteKind(selected.kind) ? mayChangeSite : mayDraw;
+    return may ? handlesOf(plane, selected, frame.metresPerPx) : [];
+  }, [selected, frame, plane, mayDraw, mayChangeSite]);
+
+  const guide = guideOf(tool.state, sceneOf(store.getState()));
+  const band =
+    moving && selected?.kind === 'rod' ? jumperBand(sheet, selected, plane, limits) : null;
+  const hand = handList(handles, guide, band, plane);
+
   const groundShapes = useMemo(() => withoutWords(ground), [ground]);
   const planShapes = useMemo(() => withoutWords(plan), [plan]);
   const words = useMemo(() => onlyWords(joined(ground, plan)), [ground, plan]);
 
+  const find = useCallback(
+    (...[at, metresPerPx, pointer]: Parameters<Parameters<typeof usePlanPointer>[3]['find']>) => {
+      const reach = Math.max(HANDLE_REACH_PX, REACH_PX[pointer]) * metresPerPx;
+      const handle = handleAt(handles, at, reach);
+      if (handle) return handle.under;
+      const [id] = piecesAt([plan, ground], at, metresPerPx, pointer);
+      return id === undefined ? null : ({ type: 'piece', id } satisfies Under);
+    },
+    [handles, plan, ground],
+  );
+  usePlanPointer(map, views, plane, {
+    send: tool.send,
+    find,
+    onHover(under) {
+      const id = under?.type === 'piece' ? under.id : null;
+      if (id !== store.getState().hovered) store.getState().hover(id);
+      const { inHand } = store.getState();
+      map.getContainer().style.cursor = inHand ? 'crosshair' : under ? 'pointer' : '';
+    },
+  });
+  usePlanKeys(map, views, plane, tool.send);
+
   if (!view) return null;
   return (
     <>
-      <PlanStage ground={groundShapes} plan={planShapes} hand={NOTHING} theme={theme} />
+      <PlanStage ground={groundShapes} plan={planShapes} hand={hand} theme={theme} />
       <GlideWith view={view}>
         <PlanWords list={words} view={view} theme={theme} />
         <PieceButtons plane={plane} view={view} />
+        {selected && (
+          <HandleButtons handles={handles} name={pieceName(sheet, selected)} view={view} />
+        )}
       </GlideWith>
     </>
   );

@@ -26,9 +26,7 @@ export function DrawingSheet() {
         </div>
         <aside className="flex min-h-0 flex-col border-l-2 border-ink">
           <ConditionsPanel />
-          <div className="flex min-h-0 grow flex-col border-t border-ink">
-            
-          </div>
+          <div className="flex min-h-0 grow flex-col border-t border-ink"></div>
           <ScaledTitleBlock />
         </aside>
       </div>

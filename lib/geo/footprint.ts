@@ -2,11 +2,10 @@ import { toRadians } from './angles';
 import type { LocalPlane } from './local-plane';
 import {
   beyondArea,
-  edgesOf,
   insideArea,
   nearestOnPath,
+  pathsMeet,
   pathToPath,
-  segmentsMeet,
   type Area,
   type Ring,
 } from './planar';
@@ -55,19 +54,22 @@ export function footprintsOverlap(one: Ring, other: Ring): boolean {
 }
 
 function separatedByAnEdge(ring: Ring, other: Ring): boolean {
-  return edgesOf([ring]).some(([a, b]) => {
+  for (let i = 1; i < ring.length; i++) {
+    const a = ring[i - 1]!;
+    const b = ring[i]!;
     // Rings run clockwise seen from above, so their outside lies to the left of each edge.
     const outside = (v: Vec): number => (b.x - a.x) * (v.y - a.y) - (b.y - a.y) * (v.x - a.x);
-    return other.every((v) => outside(v) >= -1e-9);
-  });
+    if (other.every((v) => outside(v) >= -1e-9)) return true;
+  }
+  return false;
 }
 
 /** True where the footprint and the area share ground or touch. */
 export function footprintMeetsArea(ring: Ring, area: Area): boolean {
   return (
     ring.some((corner) => insideArea(corner, area)) ||
-    area.some((edge) => edge.some((v) => insideFootprint(v, ring) && insideArea(v, area))) ||
-    edgesOf([ring]).some(([a, b]) => edgesOf(area).some(([c, d]) => segmentsMeet(a, b, c, d)))
+    area.some((edge) => pathsMeet(ring, edge)) ||
+    area.some((edge) => edge.some((v) => insideFootprint(v, ring) && insideArea(v, area)))
   );
 }
 

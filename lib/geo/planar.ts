@@ -89,10 +89,16 @@ export const distanceToArea = (p: Vec, area: Area): number => Math.max(0, beyond
 
 /** True where the segments share a point, touching ends included. */
 export function segmentsMeet(a: Vec, b: Vec, c: Vec, d: Vec): boolean {
-  const side = (p: Vec, q: Vec, r: Vec): number =>
-    Math.sign((q.x - p.x) * (r.y - p.y) - (q.y - p.y) * (r.x - p.x));
-  const [s1, s2] = [side(a, b, c), side(a, b, d)];
-  const [s3, s4] = [side(c, d, a), side(c, d, b)];
+  if (Math.max(a.x, b.x) < Math.min(c.x, d.x) || Math.max(c.x, d.x) < Math.min(a.x, b.x)) {
+    return false;
+  }
+  if (Math.max(a.y, b.y) < Math.min(c.y, d.y) || Math.max(c.y, d.y) < Math.min(a.y, b.y)) {
+    return false;
+  }
+  const s1 = side(a, b, c);
+  const s2 = side(a, b, d);
+  const s3 = side(c, d, a);
+  const s4 = side(c, d, b);
   if (s1 !== s2 && s3 !== s4) return true;
   return (
     (s1 === 0 && withinBox(c, a, b)) ||
@@ -102,6 +108,10 @@ export function segmentsMeet(a: Vec, b: Vec, c: Vec, d: Vec): boolean {
   );
 }
 
+/** −1 right of the line pq, 1 left of it, 0 on it. */
+const side = (p: Vec, q: Vec, r: Vec): number =>
+  Math.sign((q.x - p.x) * (r.y - p.y) - (q.y - p.y) * (r.x - p.x));
+
 const withinBox = (p: Vec, a: Vec, b: Vec): boolean =>
   p.x >= Math.min(a.x, b.x) &&
   p.x <= Math.max(a.x, b.x) &&
@@ -109,33 +119,27 @@ const withinBox = (p: Vec, a: Vec, b: Vec): boolean =>
   p.y <= Math.max(a.y, b.y);
 
 /** True where some part of the path lies in the area or on its edge. */
-export function pathMeetsArea(path: readonly Vec[], area: Area): boolean {
-  if (path.some((p) => insideArea(p, area))) return true;
-  return edgesOf([path]).some(([a, b]) => edgesOf(area).some(([c, d]) => segmentsMeet(a, b, c, d)));
-}
-
-export function edgesOf(rings: readonly (readonly Vec[])[]): (readonly [Vec, Vec])[] {
-  return rings.flatMap((ring) => ring.slice(1).map((v, i) => [ring[i]!, v] as const));
-}
-
-/** Least distance between two segments, 0 where they meet. */
-export function segmentToSegment(a: Vec, b: Vec, c: Vec, d: Vec): number {
-  if (segmentsMeet(a, b, c, d)) return 0;
-  return Math.min(
-    nearestOnSegment(a, c, d).metres,
-    nearestOnSegment(b, c, d).metres,
-    nearestOnSegment(c, a, b).metres,
-    nearestOnSegment(d, a, b).metres,
-  );
-}
+export const pathMeetsArea = (path: readonly Vec[], area: Area): boolean =>
+  path.some((p) => insideArea(p, area)) || area.some((ring) => pathsMeet(path, ring));
 
 /** Least distance between two paths, 0 where they meet. */
 export function pathToPath(one: readonly Vec[], other: readonly Vec[]): number {
+  if (pathsMeet(one, other)) return 0;
+  // Paths that don't meet are nearest at a vertex of one of them.
   let least = Infinity;
-  for (const [a, b] of edgesOf([one])) {
-    for (const [c, d] of edgesOf([other])) least = Math.min(least, segmentToSegment(a, b, c, d));
-  }
+  for (const p of one) least = Math.min(least, nearestOnPath(p, other).metres);
+  for (const p of other) least = Math.min(least, nearestOnPath(p, one).metres);
   return least;
+}
+
+/** True where some edge of one shares a point with some edge of the other. */
+export function pathsMeet(one: readonly Vec[], other: readonly Vec[]): boolean {
+  for (let i = 1; i < one.length; i++) {
+    for (let j = 1; j < other.length; j++) {
+      if (segmentsMeet(one[i - 1]!, one[i]!, other[j - 1]!, other[j]!)) return true;
+    }
+  }
+  return false;
 }
 
 /** Mean of one place or more; null for none. */

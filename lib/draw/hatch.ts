@@ -24,7 +24,7 @@ export function hatch(
   const every = Math.max(frame.metres(everyPx), (high - low) / MOST_STROKES);
   const strokes: Vec[][] = [];
   for (let y = Math.ceil(low / every) * every; y < high; y += every) {
-    const cuts = turned.flatMap((ring) => crossings(ring, y)).sort((a, b) => a - b);
+    const cuts = turned.flatMap((ring) => crossingsAt(ring, y)).sort((a, b) => a - b);
     for (let i = 0; i + 1 < cuts.length; i += 2) {
       strokes.push([back(cuts[i]!, y, cos, sin), back(cuts[i + 1]!, y, cos, sin)]);
     }
@@ -32,7 +32,8 @@ export function hatch(
   return strokes;
 }
 
-function crossings(ring: readonly Vec[], y: number): number[] {
+/** Where the ring crosses the level `y`, in the order of its edges. */
+export function crossingsAt(ring: readonly Vec[], y: number): number[] {
   const found: number[] = [];
   for (let i = 1; i < ring.length; i++) {
     const [a, b] = [ring[i - 1]!, ring[i]!];

@@ -21,7 +21,7 @@ const LOOKS: Readonly<Record<Run['kind'], RunLook>> = {
     strokes: [stroke('ink', 2.5, { dash: [0.1, 5], cap: 'round' })],
   },
   hose: {
-    bow: 0.06,
+    bow: 0.045,
     strokes: [stroke('paper', 4.5, { casing: { token: 'ink', width: 7.5 } })],
   },
   'test-lead': {

@@ -1,10 +1,10 @@
-import { distance, meanOf, type Vec } from '../geo';
 import { placesOf, type PieceOf } from '../layout';
 import type { Frame } from './frame';
 import { fill, line, stroke } from './marks';
-import { hachures, ringWords } from './ring-edge';
+import { hachures } from './ring-edge';
 import type { Group } from './types';
 import { lengthWords } from './words';
+import { circleRadius, wordsInCircle, wordsInOutline } from './zone-words';
 
 /** Words of the zone stand this far inside its edge. */
 const WORDS_INSET_PX = 25;
@@ -17,12 +17,16 @@ export function drawZone(frame: Frame, zone: PieceOf<'hot-zone' | 'warm-zone'>):
   const radius = circleRadius(outer);
   const name = hot ? 'HOT ZONE' : 'WARM ZONE';
   const size = radius === null ? '' : `, ${lengthWords(radius, frame.units, 0).toUpperCase()}`;
-  const letters = ringWords(frame, outer, {
+  const wording = {
     text: `${name}${size}`,
     size: WORDS_SIZE_PX,
     insetPx: hot ? WORDS_INSET_PX : WORDS_INSET_PX - 8,
     token: hot ? 'alarm' : 'caution',
-  });
+  } as const;
+  const letters =
+    radius === null
+      ? wordsInOutline(frame, rings, wording)
+      : wordsInCircle(frame, outer, radius, wording);
   const edge = hot
     ? [
         line(rings, stroke('alarm', 2.25), true, fill('alarm', frame.inkOnly ? 0 : 0.05)),
@@ -38,14 +42,4 @@ export function drawZone(frame: Frame, zone: PieceOf<'hot-zone' | 'warm-zone'>):
     },
     { id: zone.id, layer: 'label', marks: letters ? [letters] : [] },
   ];
-}
-
-/** A ring of many vertices, all as far from its middle within 1 %: its radius, else null. */
-export function circleRadius(ring: readonly Vec[]): number | null {
-  const corners = ring.slice(0, -1);
-  const middle = meanOf(corners);
-  if (corners.length < 12 || !middle) return null;
-  const radii = corners.map((v) => distance(v, middle));
-  const mean = radii.reduce((sum, r) => sum + r, 0) / radii.length;
-  return radii.every((r) => Math.abs(r - mean) <= mean * 0.01) ? mean : null;
 }

@@ -21,7 +21,7 @@ export function ChecksHead({
 }) {
   const shown = SHOWN.filter((status) => counts[status] > 0);
   return (
-    <div className="flex flex-wrap items-center gap-x-3 gap-y-1.5">
+    <div className="flex flex-wrap items-center gap-x-3 gap-y-1">
       {shown.map((status) => (
         <button
           key={status}
@@ -40,7 +40,7 @@ export function ChecksHead({
           checked={show === 'attention'}
           onChange={(event) => onShow(event.target.checked ? 'attention' : 'all')}
         />
-        Only what needs attention
+        Only open
       </label>
     </div>
   );

@@ -5,6 +5,7 @@ import { CHECKS, type Missing, type Status } from '@/lib/checks';
 import { useDrawing } from '@/lib/client/use-drawing';
 import { ChecksHead } from './checks-head';
 import { countFindings } from './count-findings';
+import { firstToFailWords } from './first-to-fail-words';
 import { FindingRow } from './finding-row';
 import { FoldedRow } from './folded-row';
 import { groupFindings, type Show } from './group-findings';
@@ -16,7 +17,7 @@ const NOTHING_OFFERED: ReadonlySet<Missing> = new Set();
 /** Every check's answer: counts, what fails first, then the findings by question, worst first. */
 export function ChecksPanel() {
   const findings = useDrawing((s) => s.findings);
-  const first = useDrawing((s) => s.firstToFail);
+  const firstWords = useDrawing((s) => firstToFailWords(s.firstToFail, s.asOf));
   const [show, setShow] = useState<Show>('all');
   const list = useRef<HTMLDivElement>(null);
   const counts = useMemo(() => countFindings(findings), [findings]);
@@ -34,10 +35,10 @@ export function ChecksPanel() {
   };
 
   return (
-    <section aria-label="Checks" className="flex min-h-0 flex-col px-4 pt-3">
+    <section aria-label="Checks" className="flex min-h-0 flex-col px-4 pt-2.5">
       <ChecksHead counts={counts} show={show} onGoTo={goTo} onShow={setShow} />
-      <p className="border-b border-rule pb-2 pt-1.5">
-        <strong>First to fail:</strong> {first.words}
+      <p className="border-b border-rule pb-1.5 pt-1 leading-snug">
+        <strong>First to fail:</strong> {firstWords}
       </p>
       <div ref={list} className="min-h-0 grow scroll-py-2 overflow-y-auto overscroll-contain pb-3">
         {groups.length === 0 && (

@@ -1,12 +1,12 @@
 import type { Finding } from '@/lib/checks';
+import { pieceName } from '@/components/drawing/piece-words';
 import { findPiece, type Sheet } from '@/lib/layout';
-import { pieceWords } from '@/lib/edits';
 
 /** Names of the subjects as people say them; systems, classes and tickets are names already. */
 export const subjectNames = (sheet: Sheet, { subjects }: Finding): string[] =>
   subjects.map((subject) => {
     const piece = findPiece(sheet, subject);
-    return piece ? pieceWords(piece) : subject;
+    return piece ? pieceName(sheet, piece) : subject.replaceAll('-', ' ');
   });
 
 /** The finding's sentence, with what it is about put before it where it doesn't say so itself. */

@@ -57,25 +57,37 @@ export const arcDegrees = (arc: WindArc): number =>
   isWholeTurn(arc) ? 360 : normaliseDegrees(arc.to_deg - arc.from_deg);
 
 export type Stands = {
-  readonly words: string;
+  /** What matters first, where it does not stand: "Does not stand now". */
+  readonly alarm: string | null;
+  readonly words: string | null;
   readonly tone: 'stands' | 'does-not' | 'not-known';
 };
 
-/** What the arc of the dial says. `known` is false while something that it rests on is missing. */
-export function standsWords(arc: WindArc | null, wind: Entered<Wind>, known: boolean): Stands {
+/**
+ * What the arc of the dial says. `judged` is whether any piece could be held against the wind:
+ * before that, having no arc means nothing.
+ */
+export function standsWords(
+  arc: WindArc | null,
+  wind: Entered<Wind>,
+  { judged, calmBelowMph }: { judged: boolean; calmBelowMph: number },
+): Stands {
   if (!arc) {
-    return known
-      ? { words: 'Stands for no wind', tone: 'does-not' }
-      : { words: 'Not known which wind it stands for', tone: 'not-known' };
+    if (!judged) {
+      return { alarm: null, words: 'Not known which wind it stands for', tone: 'not-known' };
+    }
+    const calm = wind?.speed_mph != null && wind.speed_mph < calmBelowMph;
+    const alarm = calm ? 'Calm: nowhere is upwind' : 'Stands for no wind';
+    return { alarm, words: null, tone: 'does-not' };
   }
   const words = isWholeTurn(arc)
     ? 'Stands for any wind'
     : `Stands for wind ${degreesWords(arc.from_deg)} through ${degreesWords(arc.to_deg)}`;
-  if (wind?.from_deg == null) return { words, tone: 'not-known' };
+  if (wind?.from_deg == null) return { alarm: null, words, tone: 'not-known' };
   if (!inArc(wind.from_deg, arc)) {
-    return { words: `Does not stand now. ${words}`, tone: 'does-not' };
+    return { alarm: 'Does not stand now', words, tone: 'does-not' };
   }
-  return { words, tone: 'stands' };
+  return { alarm: null, words, tone: 'stands' };
 }
 
 export type SteepnessUnit = '%' | '°';

@@ -1,7 +1,6 @@
 'use client';
 
 import { useId, useState } from 'react';
-import { Button } from '@/components/ui/button';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
 import { inArc } from './condition-words';
 import { slopeEdit, windEdit } from './condition-edits';
@@ -27,8 +26,8 @@ export function ConditionsPanel() {
   };
 
   return (
-    <section aria-label="Conditions" className="px-4 py-3">
-      <div className="grid grid-cols-[minmax(8rem,11rem)_minmax(0,1fr)] gap-4">
+    <section aria-label="Conditions" className="px-4 py-2.5">
+      <div className="grid grid-cols-[minmax(8rem,10rem)_minmax(0,1fr)] gap-4">
         <Dial
           conditions={conditions}
           arc={arc}
@@ -36,20 +35,19 @@ export function ConditionsPanel() {
           disabled={!canDraw}
           onClear={clear}
         />
-        <div className="flex flex-col justify-between gap-1">
-          <ConditionsWords />
+        <ConditionsWords>
           {canDraw && (
-            <Button
-              look="quiet"
-              className="pointer-coarse:!min-h-11 !min-h-8 self-start !px-0"
+            <button
+              type="button"
+              className="pointer-coarse:min-h-11 min-h-6 cursor-pointer underline underline-offset-4"
               aria-expanded={typing}
               aria-controls={formId}
               onClick={() => setTyping(!typing)}
             >
-              {typing ? 'Done typing' : 'Type conditions'}
-            </Button>
+              {typing ? 'Done' : 'Type them in'}
+            </button>
           )}
-        </div>
+        </ConditionsWords>
       </div>
       <div id={formId} hidden={!typing}>
         {typing && <ConditionsForm />}

@@ -1,5 +1,6 @@
 'use client';
 
+import type { ReactNode } from 'react';
 import { StatusShape } from '@/components/ui/status-mark';
 import { useDrawing } from '@/lib/client/use-drawing';
 import {
@@ -17,12 +18,12 @@ import { NotEntered } from './not-entered';
 import { useSpeedUnit, useSteepnessUnit } from './units';
 
 /** What the dial shows, in words: wind, how old it is, what the layout stands for, downhill. */
-export function ConditionsWords() {
+export function ConditionsWords({ children }: { children?: ReactNode }) {
   const { wind, slope, soil } = useDrawing((s) => s.sheet.layout.conditions);
   const asOf = useDrawing((s) => s.asOf);
   const limits = useDrawing((s) => s.limits.values);
   const arc = useDrawing((s) => s.standsFor);
-  const arcKnown = useDrawing((s) => s.findings.some(isWindKnown));
+  const judged = useDrawing((s) => s.findings.some(isHeldToTheWind));
   const [speedUnit] = useSpeedUnit();
   const [steepnessUnit] = useSteepnessUnit();
 
@@ -32,7 +33,7 @@ export function ConditionsWords() {
   const downhill = downhillWords(slope, steepnessUnit, limits.level_below_pct);
   const soilLine = soilWords(soil);
   return (
-    <div className="min-w-0 space-y-2 leading-snug">
+    <div className="min-w-0 space-y-1.5 leading-snug">
       <div>
         <p className="text-lg font-bold leading-tight">
           {from ?? <NotEntered>Wind not known</NotEntered>}
@@ -48,17 +49,22 @@ export function ConditionsWords() {
           <NotEntered>when seen</NotEntered>
         )}
       </div>
-      <StandsLine stands={standsWords(arc, wind, arcKnown)} />
+      <StandsLine
+        stands={standsWords(arc, wind, { judged, calmBelowMph: limits.calm_below_mph })}
+      />
       <div>
         <p>{downhill ?? <NotEntered>Slope not known</NotEntered>}</p>
-        {soilLine && <p className="text-ink-soft">{soilLine}</p>}
+        <div className="flex flex-wrap items-baseline justify-between gap-x-3">
+          {soilLine && <p className="text-ink-soft">{soilLine}</p>}
+          {children}
+        </div>
       </div>
     </div>
   );
 }
 
 /** With one answer to `upwind` there is wind and a source, and so an arc or truly none. */
-const isWindKnown = ({ rule, status }: { rule: string; status: string }): boolean =>
+const isHeldToTheWind = ({ rule, status }: { rule: string; status: string }): boolean =>
   rule === 'upwind' && status !== 'not-known' && status !== 'n/a';
 
 function SeenLine({ seen }: { seen: Seen }) {
@@ -71,16 +77,19 @@ function SeenLine({ seen }: { seen: Seen }) {
   );
 }
 
-function StandsLine({ stands }: { stands: Stands }) {
-  if (stands.tone === 'stands') {
-    return <p className="font-bold leading-tight text-spruce">{stands.words}</p>;
-  }
-  if (stands.tone === 'does-not') {
-    return (
-      <p className="font-bold leading-tight text-alarm">
-        <StatusShape status="not-met" /> {stands.words}
-      </p>
-    );
-  }
-  return <p className="font-bold leading-tight">{stands.words}</p>;
+function StandsLine({ stands: { alarm, words, tone } }: { stands: Stands }) {
+  return (
+    <div className="leading-tight">
+      {alarm && (
+        <p className="font-bold text-alarm">
+          <StatusShape status="not-met" /> {alarm}
+        </p>
+      )}
+      {words && (
+        <p className={tone === 'stands' ? 'font-bold text-spruce' : alarm ? '' : 'font-bold'}>
+          {words}
+        </p>
+      )}
+    </div>
+  );
 }

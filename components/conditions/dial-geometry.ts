@@ -18,9 +18,12 @@ export const DIAL = {
 
 export type Spot = { readonly x: number; readonly y: number };
 
+const round = (n: number): number => Math.round(n * 100) / 100 || 0;
+
 export function spot(degrees: number, radius: number): Spot {
   const angle = toRadians(degrees);
-  return { x: Math.sin(angle) * radius, y: -Math.cos(angle) * radius };
+  // Rounded, because engines differ in the last digits of a sine and the page is drawn by two.
+  return { x: round(Math.sin(angle) * radius), y: round(-Math.cos(angle) * radius) };
 }
 
 /** Direction from the dial's middle to a place of the screen, whole degrees. */
@@ -54,5 +57,4 @@ export function sectorPath(
   );
 }
 
-const at = ({ x, y }: Spot): string => `${round(x)} ${round(y)}`;
-const round = (n: number): number => Math.round(n * 100) / 100;
+const at = ({ x, y }: Spot): string => `${x} ${y}`;

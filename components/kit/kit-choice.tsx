@@ -29,11 +29,11 @@ export function KitChoice({ className }: { className?: string }) {
   };
 
   return (
-    <Field label="Kit" className={className}>
+    <Field label={<span className="sr-only">Kit</span>} className={className}>
       {(ties) => (
         <Select
           {...ties}
-          className="pointer-coarse:!min-h-11 !min-h-9 !px-2 !py-0.5"
+          className="pointer-coarse:!min-h-11 !min-h-9 !px-1 !py-0.5"
           disabled={!canDraw}
           value={value}
           onChange={(event) => choose(event.target.value)}

@@ -17,25 +17,18 @@ export function KitShelf() {
   return (
     <section
       aria-label="Kit shelf"
-      className="grid gap-x-5 gap-y-2 px-3 py-2 lg:grid-cols-[11rem_minmax(0,1fr)]"
+      className="px-3 py-1.5"
       onKeyDown={(event) => {
         if (event.key === 'Escape') putDown();
       }}
     >
-      <div className="grid grid-cols-2 gap-2 lg:grid-cols-1 lg:gap-1 [&_label]:text-sm">
-        <KitChoice />
-        <PumpChoice />
-      </div>
-      <div className="min-w-0">
-        <FromTheKit />
-        <OnTheGround />
-      </div>
+      <FromTheKit />
+      <OnTheGround />
     </section>
   );
 }
 
-const ROW =
-  'flex gap-x-1 overflow-x-auto overscroll-x-contain [scrollbar-width:thin] lg:flex-wrap lg:overflow-visible';
+const ROW = 'flex items-center gap-x-1 overflow-x-auto overscroll-x-contain [scrollbar-width:thin]';
 
 function FromTheKit() {
   const layout = useDrawing((s) => s.sheet.layout);
@@ -44,21 +37,29 @@ function FromTheKit() {
   const along = useMemo(() => alongItems(layout), [layout]);
   const { tabIndexOf, onFocus, onKeyDown } = useRoving(items.length);
   return (
-    <div role="toolbar" aria-label="From the kit" className={ROW} onKeyDown={onKeyDown}>
-      {items.map((item, place) => (
-        <ShelfButton
-          key={item.key}
-          inHand={item.inHand}
-          words={item.words}
-          note={<Left left={item.left} />}
-          dim={item.left !== null && item.left <= 0}
-          tabIndex={tabIndexOf(place)}
-          onFocus={() => onFocus(place)}
-        />
-      ))}
+    <div className={ROW}>
+      <KitChoice className="mr-1 w-36 shrink-0" />
+      <div
+        role="toolbar"
+        aria-label="From the kit"
+        className="flex shrink-0 gap-x-1"
+        onKeyDown={onKeyDown}
+      >
+        {items.map((item, place) => (
+          <ShelfButton
+            key={item.key}
+            inHand={item.inHand}
+            words={item.words}
+            note={<Left left={item.left} />}
+            dim={item.left !== null && item.left <= 0}
+            tabIndex={tabIndexOf(place)}
+            onFocus={() => onFocus(place)}
+          />
+        ))}
+      </div>
       {along.length > 0 && (
-        <p className="shrink-0 self-center px-2 text-sm leading-tight text-ink-soft">
-          Also in the kit: {along.map(({ words, count }) => `${count} ${words}`).join(', ')}
+        <p className="w-32 shrink-0 px-2 text-sm leading-tight text-ink-soft">
+          Also {along.map(({ words, count }) => `${count} ${words}`).join(', ')}
         </p>
       )}
     </div>
@@ -66,17 +67,12 @@ function FromTheKit() {
 }
 
 function Left({ left }: { left: number | null }) {
-  const words =
-    left === null
-      ? 'as many as needed'
-      : left > 0
-        ? `${left} left`
-        : left === 0
-          ? 'none left'
-          : `${-left} short`;
-  const alarm = left !== null && left <= 0;
+  if (left === null) return <span className="block text-sm">no kit</span>;
+  const words = left > 0 ? `${left} left` : left === 0 ? 'none left' : `${-left} short`;
   return (
-    <span className={`block whitespace-nowrap text-sm ${alarm ? 'font-semibold text-alarm' : ''}`}>
+    <span
+      className={`block whitespace-nowrap text-sm ${left <= 0 ? 'font-semibold text-alarm' : ''}`}
+    >
       {words}
     </span>
   );
@@ -89,23 +85,28 @@ function OnTheGround() {
   const { tabIndexOf, onFocus, onKeyDown } = useRoving(items.length);
   return (
     <div
-      role="toolbar"
-      aria-label="On the ground"
-      className={`${ROW} mt-1 border-t border-rule-faint pt-1`}
-      onKeyDown={onKeyDown}
+      className={`${ROW} mt-0.5 border-t border-rule-faint pt-0.5 lg:flex-wrap lg:overflow-visible`}
     >
-      {items.map((item, place) => (
-        <ShelfButton
-          key={item.key}
-          small
-          inHand={item.inHand}
-          words={item.words}
-          note={item.drawn && <span className="text-sm"> drawn</span>}
-          disabled={item.drawn}
-          tabIndex={tabIndexOf(place)}
-          onFocus={() => onFocus(place)}
-        />
-      ))}
+      <div
+        role="toolbar"
+        aria-label="On the ground"
+        className="flex shrink-0 gap-x-0.5 lg:shrink lg:flex-wrap"
+        onKeyDown={onKeyDown}
+      >
+        {items.map((item, place) => (
+          <ShelfButton
+            key={item.key}
+            small
+            inHand={item.inHand}
+            words={item.words}
+            note={item.drawn && <span className="sr-only"> drawn</span>}
+            disabled={item.drawn}
+            tabIndex={tabIndexOf(place)}
+            onFocus={() => onFocus(place)}
+          />
+        ))}
+      </div>
+      <PumpChoice className="w-56 shrink-0" />
     </div>
   );
 }

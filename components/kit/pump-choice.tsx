@@ -16,11 +16,11 @@ export function PumpChoice({ className }: { className?: string }) {
   const canDraw = useDrawing((s) => s.canDraw);
   const apply = useDrawing((s) => s.apply);
   return (
-    <Field label="Pump" className={className}>
+    <Field label="Pump" className={`!flex-row !items-center ${className ?? ''}`}>
       {(ties) => (
         <Select
           {...ties}
-          className="pointer-coarse:!min-h-11 !min-h-9 !px-2 !py-0.5"
+          className="pointer-coarse:!min-h-11 !min-h-7 !px-1 !py-0"
           disabled={!canDraw}
           value={pump ?? ''}
           onChange={(event) => {

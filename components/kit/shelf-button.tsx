@@ -48,7 +48,7 @@ export function ShelfButton({
       onKeyDown={(event) => {
         if (event.key === 'Escape' && held) putDown();
       }}
-      className={`pointer-coarse:min-h-11 inline-flex shrink-0 cursor-pointer items-center gap-1.5 border-[1.5px] px-1.5 text-left leading-tight ${
+      className={`pointer-coarse:min-h-11 inline-flex shrink-0 cursor-pointer items-center gap-1 border-[1.5px] px-1 text-left leading-tight ${
         small ? 'min-h-7' : 'min-h-11 py-1'
       } ${
         held
@@ -56,9 +56,13 @@ export function ShelfButton({
           : 'border-transparent hover:border-ink'
       } ${(dim || disabled) && !held ? 'text-ink-soft' : ''} ${disabled ? '!cursor-default' : ''}`}
     >
-      <KitSymbol kind={inHand.kind} size={small ? 26 : 36} />
+      <KitSymbol kind={inHand.kind} size={small ? 22 : 32} />
       <span>
-        <span className={small ? '' : 'block font-semibold'}>{words}</span>
+        <span
+          className={`whitespace-nowrap ${small ? 'text-[15px]' : 'block text-[15px] font-semibold'}`}
+        >
+          {words}
+        </span>
         {note}
       </span>
     </button>

@@ -8,8 +8,8 @@ import {
   type KitItem,
   type KitKind,
   type Layout,
+  type Rod,
 } from '@/lib/layout';
-import { takenByRuns } from './taken-by-runs';
 
 /** What lies on the shelf: what is picked with it, and how many are left; null is without end. */
 export type ShelfItem = {
@@ -45,10 +45,10 @@ const WORDS: Partial<Record<Kind, string>> = {
   hose: 'Hose',
 };
 
-const ALONG_WORDS: Partial<Record<KitKind, string>> = {
-  coupler: 'couplers',
-  clamp: 'clamps',
-  driver: 'drivers',
+const ALONG_WORDS: Partial<Record<KitKind, readonly [string, string]>> = {
+  coupler: ['coupler', 'couplers'],
+  clamp: ['clamp', 'clamps'],
+  driver: ['driver', 'drivers'],
 };
 
 const WITHOUT_A_KIT: readonly Kind[] = [
@@ -80,7 +80,7 @@ export function shelfItems(layout: Layout, findings: readonly Finding[]): ShelfI
 export const alongItems = (layout: Layout): AlongItem[] =>
   (layout.kit?.items ?? []).flatMap(({ kind, count }) => {
     const words = ALONG_WORDS[kind];
-    return words ? [{ words, count }] : [];
+    return words ? [{ words: count === 1 ? words[0] : words[1], count }] : [];
   });
 
 function itemFor(kind: Kind, item: KitItem | null, key: string, left: number | null): ShelfItem {
@@ -90,7 +90,7 @@ function itemFor(kind: Kind, item: KitItem | null, key: string, left: number | n
 
 function sizeWords(kind: Kind, item: KitItem | null): string | null {
   if (kind === 'hose') return item?.diameter_in ? `${item.diameter_in} in` : null;
-  return item?.length_ft ? `${item.length_ft} ft` : null;
+  return item?.length_ft ? `${item.length_ft}${kind === 'rod' ? ' ft' : ''}` : null;
 }
 
 function membersFor(kind: Kind, item: KitItem | null): Record<string, unknown> {
@@ -106,51 +106,45 @@ function membersFor(kind: Kind, item: KitItem | null): Record<string, unknown> {
 /** What is left of each item of the kit; below zero where more are drawn than there are. */
 function leftOf(layout: Layout, findings: readonly Finding[]): number[] {
   const items = layout.kit?.items ?? [];
-  const taken = items.map((item) => (item.kind === 'rod' ? rodsTaken(layout, item) : 0));
-  const kinds = [...new Set(items.map((item) => item.kind))];
-  for (const kind of kinds) {
-    const places = items.flatMap((item, place) => (item.kind === kind ? [place] : []));
-    const counted = countedNeed(findings, kind);
-    if (kind === 'rod') continue;
-    if (kind === 'probe' || kind === 'tester' || kind === 'test-lead') {
-      spread(places, counted, items, taken);
-      continue;
+  const left = items.map((item) => item.count);
+  const take = (count: number, fits: (item: KitItem) => boolean): void => {
+    for (let one = 0; one < count; one++) {
+      const free = items.findIndex((item, i) => fits(item) && left[i]! > 0);
+      const place = free >= 0 ? free : items.findIndex(fits);
+      if (place >= 0) left[place]! -= 1;
     }
-    const ofKind = places.map((place) => items[place]!);
-    takenByRuns(ofKind, runNeeds(layout, findings, kind)).forEach((count, i) => {
-      taken[places[i]!] = count;
-    });
+  };
+  for (const rod of piecesOf(layout.pieces, 'rod')) take(1, (item) => isSuchARod(item, rod));
+  for (const kind of ONE_SYSTEM_AT_A_TIME) {
+    take(countedNeed(findings, kind), (item) => item.kind === kind);
   }
-  return items.map((item, place) => item.count - taken[place]!);
+  for (const given of itemsGiven(layout, findings)) {
+    take(1, (item) => item.kind === given.kind && item.length_ft === given.lengthFt);
+  }
+  return left;
 }
 
-const rodsTaken = (layout: Layout, item: KitItem): number =>
-  piecesOf(layout.pieces, 'rod').filter(
-    (rod) =>
-      (item.length_ft == null || rodLengthFt(rod) === item.length_ft) &&
-      (item.diameter_in == null || rodDiameterIn(rod) === item.diameter_in),
-  ).length;
+/** Probes and the tester are moved on from system to system: the check counts what one takes. */
+const ONE_SYSTEM_AT_A_TIME = ['probe', 'tester'] as const;
 
-/** Probes, leads and the tester serve one system at a time: the check counts what that takes. */
+const isSuchARod = (item: KitItem, rod: Rod): boolean =>
+  item.kind === 'rod' &&
+  (item.length_ft == null || rodLengthFt(rod) === item.length_ft) &&
+  (item.diameter_in == null || rodDiameterIn(rod) === item.diameter_in);
+
 const countedNeed = (findings: readonly Finding[], kind: KitKind): number =>
   findings.find(({ rule, subjects }) => rule === 'kit-covers' && subjects[0] === kind)?.measured
     ?.value ?? 0;
 
-/** From the items in order; what none of them has left is owed by the last. */
-function spread(places: number[], count: number, items: readonly KitItem[], taken: number[]): void {
-  let open = count;
-  places.forEach((place, i) => {
-    const most = i === places.length - 1 ? open : Math.min(open, items[place]!.count);
-    taken[place] = most;
-    open -= most;
+/** Which item the check gave to each run that is reached: its length is the run's limit. */
+function itemsGiven(
+  layout: Layout,
+  findings: readonly Finding[],
+): { kind: Kind; lengthFt: number }[] {
+  const kinds = new Map(layout.pieces.map((piece) => [piece.id, piece.kind]));
+  return findings.flatMap(({ rule, status, subjects, allowed }) => {
+    const kind = kinds.get(subjects[0] ?? '');
+    if (rule !== 'cables-reach' || status !== 'meets' || !kind || allowed?.max == null) return [];
+    return [{ kind, lengthFt: allowed.max }];
   });
-}
-
-function runNeeds(layout: Layout, findings: readonly Finding[], kind: KitKind) {
-  const ids = new Set(layout.pieces.flatMap((piece) => (piece.kind === kind ? [piece.id] : [])));
-  return findings.flatMap(({ rule, subjects, measured }) =>
-    rule === 'cables-reach' && measured && ids.has(subjects[0] ?? '')
-      ? [{ feet: measured.value }]
-      : [],
-  );
 }

@@ -55,13 +55,10 @@ export function TitleBlock({
             }
           />
         </h2>
-        <p className="shrink-0 text-right font-bold leading-tight text-alarm">
-          <span className="text-lg">DRAFT</span>
-          <span className="block text-sm">NOT APPROVED</span>
-        </p>
+        <p className="shrink-0 text-lg font-bold leading-tight text-alarm">DRAFT</p>
       </div>
       <Verdict />
-      <dl className="grid grid-cols-3 text-[15px] leading-tight">
+      <dl className="grid grid-cols-[1fr_auto_1fr] text-[15px] leading-tight">
         <Cell label="Liquid" className="col-span-2">
           <Change
             words={liquidWords(layout.liquid)}
@@ -81,8 +78,8 @@ export function TitleBlock({
         </Cell>
         <Cell label="Drawn by">{meta.drawnBy ?? '–'}</Cell>
         <Cell label="Checked by">–</Cell>
-        <Cell label="Revision">draft</Cell>
-        <Cell label={meta.agencyName} className="col-span-2">
+        <Cell label="Revision">draft, not approved</Cell>
+        <Cell label={meta.agencyName} className={metresPerPx === null ? 'col-span-3' : ''}>
           <Change
             words={layout.planned_at ? dateTimeWords(layout.planned_at) : null}
             lack="start not planned"
@@ -92,9 +89,13 @@ export function TitleBlock({
             onToggle={() => toggle('time')}
           />
         </Cell>
-        <Cell label="Site">{meta.siteName}</Cell>
+        {metresPerPx !== null && (
+          <div className="col-span-2 border-b border-ink px-3 py-1">
+            <ScaleBar metresPerPx={metresPerPx} />
+          </div>
+        )}
       </dl>
-      <div id={editorId} hidden={editing === null} className="border-t border-ink px-3 py-2">
+      <div id={editorId} hidden={editing === null} className="border-b border-ink px-3 py-2">
         {editing === 'liquid' && <LiquidFields />}
         {editing === 'time' && (
           <TimeEntry
@@ -110,10 +111,7 @@ export function TitleBlock({
           />
         )}
       </div>
-      <div className="flex flex-wrap items-end justify-between gap-x-4 gap-y-1 border-t border-ink px-3 py-1.5">
-        {metresPerPx !== null && <ScaleBar metresPerPx={metresPerPx} />}
-        <Caution field={field} className="text-sm leading-tight" />
-      </div>
+      <Caution field={field} className="px-3 py-1 text-sm leading-tight" />
     </section>
   );
 }
@@ -128,7 +126,9 @@ function Cell({
   children: ReactNode;
 }) {
   return (
-    <div className={`min-w-0 border-b border-r border-ink px-3 py-1 ${className}`}>
+    <div
+      className={`min-w-0 border-b border-r border-ink px-3 py-1 last-of-type:border-r-0 ${className}`}
+    >
       <dt className="truncate text-sm leading-tight text-ink-soft">{label}</dt>
       <dd>{children}</dd>
     </div>

@@ -74,6 +74,7 @@ function openGround(
       bands.every(({ path, half }) => nearestOnPath(p, path).metres > half + clear) &&
       filled.every((area) => !insideArea(p, area)) &&
       scene.tanks.every((t) => Math.hypot(t.at[0] - p.x, t.at[1] - p.y) > t.diameter_ft / 2 + 4) &&
+      scene.fixed.every((f) => Math.hypot(f.at[0] - p.x, f.at[1] - p.y) > 12) &&
       scene.trees.every((t) => Math.hypot(t.at[0] - p.x, t.at[1] - p.y) > t.crown_ft / 2 + 3)
     );
   };

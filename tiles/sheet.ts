@@ -25,8 +25,8 @@ const LAYERS = [
   fences,
   overhead,
   trees,
-  fixedThings,
   contourHeights,
+  fixedThings,
   names,
 ] as const;
 

@@ -3,10 +3,12 @@ import type { Ft, Road, Scene } from '../scene';
 
 /** A team track beside a branch line, with a slab where rail cars are emptied into tank trucks. */
 
-const TRACKS_RUN_DEG = 84;
+export const TRACKS_RUN_DEG = 84;
 
 /** Feet along the tracks from the origin, eastward, and to the right (south) of the team track. */
-const by = (along: number, right: number): Ft => step([0, 0], TRACKS_RUN_DEG, along, right);
+export const alongTracks = (along: number, right: number): Ft =>
+  step([0, 0], TRACKS_RUN_DEG, along, right);
+const by = alongTracks;
 const lot = (along: number, right: number, lengthFt: number, widthFt: number): Ft[] =>
   rectangle(by(along, right), TRACKS_RUN_DEG, lengthFt, widthFt);
 

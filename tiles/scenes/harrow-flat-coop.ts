@@ -70,6 +70,7 @@ export const harrowFlatCoop: Scene = {
   roads: [harrowRoad, entrance('west-entrance', -20, 34), entrance('east-entrance', 190, -30)],
   hardstands: [
     { id: 'fuel-yard', outline: yard, surface: 'gravel' },
+    { id: 'north-apron', outline: rectangle([-8, 66], 100, 76, 46), surface: 'gravel' },
     { id: 'rack-slab', outline: rectangle([0, 0], 100, 86, 34), surface: 'concrete' },
     { id: 'dike-floor', outline: rectangle(dikeCentre, 100, 124, 72), surface: 'concrete' },
   ],
@@ -220,10 +221,10 @@ export const harrowFlatCoop: Scene = {
     { at: [-232, -190], crown_ft: 22 },
   ],
   fixed: [
-    { id: 'F1', name: 'Hydrant 3', at: [-76, 62], looks: 'hydrant' },
+    { id: 'F1', name: 'Hydrant 3', at: [-66, 118], looks: 'hydrant' },
     { id: 'F2', name: 'Yard sign post', at: [-62, -140], looks: 'sign' },
-    { id: 'F3', name: 'Yard light 1', at: [-54, 48], looks: 'light' },
-    { id: 'F4', name: 'Water marker post', at: [-112, 88], looks: 'marker' },
+    { id: 'F3', name: 'Yard light 1', at: [-49, 100], looks: 'light' },
+    { id: 'F4', name: 'Water marker post', at: [-112, 132], looks: 'marker' },
   ],
   names: [
     {

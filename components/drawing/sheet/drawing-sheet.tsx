@@ -1,8 +1,8 @@
 'use client';
 
-import dynamic from 'next/dynamic';
-import { CAUTION_WORDS } from '@/components/ui/caution';
+import { ChecksPanel } from '@/components/checks/checks-panel';
 import { ConditionsPanel } from '@/components/conditions';
+import { KitShelf } from '@/components/kit';
 import { TitleBlock } from '@/components/title-block';
 import { useView } from '../map/view-store';
 import { IndexTabs } from './index-tabs';
@@ -22,11 +22,13 @@ export function DrawingSheet() {
           <main className="min-h-0 grow" aria-label="Plan">
             <PlanFrame />
           </main>
-          <div className="min-h-20 pl-8" />
+          <KitShelf />
         </div>
         <aside className="flex min-h-0 flex-col border-l-2 border-ink">
           <ConditionsPanel />
-          <div className="flex min-h-0 grow flex-col border-t border-ink"></div>
+          <div className="flex min-h-0 grow flex-col border-t border-ink">
+            <ChecksPanel />
+          </div>
           <ScaledTitleBlock />
         </aside>
       </div>

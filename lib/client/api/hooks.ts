@@ -66,4 +66,7 @@ export const useLayout = (layoutId: string | null) =>
     revalidateOnFocus: false,
     revalidateIfStale: false,
     revalidateOnReconnect: false,
+    // Opened anew it must not be the copy that was kept from before its last saves.
+    revalidateOnMount: true,
+    dedupingInterval: 0,
   });

@@ -8,6 +8,8 @@ export type Draft = {
   /** When it was last written here, ISO 8601. */
   readonly at: string;
   readonly sheet: Sheet;
+  /** Which part holds changes; the other is only as the server had it then. */
+  readonly changed: { readonly layout: boolean; readonly site: boolean };
   /** The versions that the changes were made from. */
   readonly layoutVersion: number;
   readonly groundVersion: number;

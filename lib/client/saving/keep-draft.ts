@@ -41,7 +41,12 @@ export function keepDraft(
     try {
       if (isDirty(present, base)) {
         const { layoutVersion, groundVersion } = base;
-        await shelf.write({ ...key, at: now(), sheet: present, layoutVersion, groundVersion });
+        const changed = {
+          layout: present.layout !== base.sheet.layout,
+          site: present.site !== base.sheet.site,
+        };
+        const versions = { layoutVersion, groundVersion };
+        await shelf.write({ ...key, at: now(), sheet: present, changed, ...versions });
       } else {
         await shelf.remove(key);
       }
@@ -72,7 +77,9 @@ export function keepDraft(
     },
     stop() {
       unsubscribe();
-      callOff?.();
+      if (!callOff) return;
+      callOff();
+      busy = busy.then(write);
     },
   };
 }

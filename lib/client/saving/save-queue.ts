@@ -150,6 +150,11 @@ export function startSaving(store: DrawingStore, sending: Sending): SaveQueue {
     if (status !== 'stale') plan(SAVE_AFTER_MS);
   });
 
+  if (dirty()) {
+    tell('unsaved');
+    plan(SAVE_AFTER_MS);
+  }
+
   return {
     retry: () => {
       dropPlan();

@@ -1,6 +1,10 @@
+export { borderTicks, drawGrid, roundStep, type Tick } from './grid';
+export { sheetName } from './names';
 export { paint, paintMark, type PaintOptions, type Surface } from './paint';
+export * from './paper';
 export * from './projector';
 export { drawLayout, drawSheet, drawSite, joined, type SheetInput } from './sheet';
 export { svgDocument, svgNodes, svgText, type SvgNode, type SvgOptions } from './svg';
+export { textWidth } from './text-width';
 export * from './themes';
 export * from './types';

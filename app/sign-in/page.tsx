@@ -28,11 +28,11 @@ export default async function SignInPage({ searchParams }: { searchParams: Searc
       </div>
       <section aria-labelledby="forgotten" className="mt-10 max-w-md border-t border-rule pt-4">
         <h2 id="forgotten" className="font-bold">
-          Forgotten your password, or none yet?
+          You can’t sign in?
         </h2>
         <p className="mt-1">
-          Ask your agency’s administrator for a new one. Handouts already printed, and the blank
-          readings page, need no sign-in.
+          Forgotten your password, or no account yet: ask your agency’s administrator. Handouts
+          already printed, and the blank readings page, need no sign-in.
         </p>
       </section>
     </SheetFrame>

@@ -11,9 +11,11 @@ import { signInWords } from '@/lib/api/sign-in';
 import { requestSignIn } from './auth-requests';
 import { returnPath } from './return-path';
 
+const filled = (error: string) => z.string({ error }).min(1, { error });
+
 const entered = z.object({
-  email: z.string().trim().min(1, { error: 'Enter your e-mail address.' }),
-  password: z.string().min(1, { error: 'Enter your password.' }),
+  email: filled('Enter your e-mail address.'),
+  password: filled('Enter your password.'),
 });
 
 const UNREACHABLE =
@@ -27,7 +29,6 @@ export function SignInForm({ back, refused }: { back: string | null; refused: st
   const [refusal, setRefusal] = useState(refused && signInWords(refused));
   const { register, handleSubmit, formState, resetField, setFocus } = useForm({
     resolver: zodResolver(entered),
-    defaultValues: { email: '', password: '' },
   });
 
   const submit = handleSubmit(async ({ email, password }) => {
@@ -49,7 +50,8 @@ export function SignInForm({ back, refused }: { back: string | null; refused: st
 
   const leaving = formState.isSubmitSuccessful && !refusal;
   return (
-    <form onSubmit={submit} noValidate className="flex max-w-md flex-col gap-5">
+    // Sent before the page is ready, a form must not put the password into the address: so, post.
+    <form method="post" onSubmit={submit} noValidate className="flex max-w-md flex-col gap-5">
       {refusal && (
         <Notice kind="failed" title="Not signed in.">
           {refusal}

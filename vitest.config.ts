@@ -10,7 +10,10 @@ export default defineConfig({
   resolve: { alias },
   test: {
     projects: [
-      { resolve: { alias }, test: { name: 'unit', include: ['tests/unit/**/*.test.ts'] } },
+      {
+        resolve: { alias },
+        test: { name: 'unit', include: ['tests/unit/**/*.test.ts'], testTimeout: 120_000 },
+      },
       {
         resolve: { alias },
         test: { name: 'published', include: ['tests/published/**/*.test.ts'] },

@@ -1,3 +1,4 @@
+export { KIND_WORDS } from './kind-words';
 export * from './pieces';
 export * from './plan';
 export * from './queries';

@@ -1,5 +1,6 @@
 import type { LonLat } from '../geo';
 import { PIECE_DEFAULTS } from '../limits';
+import { KIND_WORDS } from './kind-words';
 import type { Kind, Piece, PieceOf, Probe, Rod, Run, Unit } from './pieces';
 import type { Layout, Sheet, SiteGround } from './schema';
 import { SYSTEMS, type System } from './values';
@@ -80,11 +81,17 @@ export function unitSizeFt(unit: Unit): { length: number; width: number } {
   return { length: unit.length_ft ?? size.length_ft, width: unit.width_ft ?? size.width_ft };
 }
 
-/** What to call a piece in a sentence: its label, else its kind's words, else its id. */
+/** Ids that the product makes. Any other was given by a person or a file and may serve as a name. */
+const MADE_ID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i;
+
+/** What to call a piece in a sentence: its label, else what a person called it, else its kind. */
 export function nameOf(piece: Piece): string {
   if (piece.label) return piece.label;
   if (isUnit(piece)) return UNIT_WORDS[systemOfUnit(piece)];
-  return piece.id;
+  if (!MADE_ID.test(piece.id)) return piece.id;
+  return piece.kind === 'y-probe' && piece.serves
+    ? `Y probe for ${piece.serves.join(', ')}`
+    : KIND_WORDS[piece.kind];
 }
 
 export function findPiece(sheet: Sheet, id: string): Piece | null {

@@ -1,5 +1,5 @@
 import { metresToFeet, toDegrees, type Vec } from '../geo';
-import { DRAWN_WITHIN_FT, LIMIT_TABLE, TRUE_POINT_RATIO, type Limits } from '../limits';
+import { DRAWN_WITHIN_FT, TRUE_POINT_RATIO, type Limits } from '../limits';
 import type { Layout } from '../layout';
 import { answer, atMost, measured } from './support/answer';
 import { forEachLine, lineNotDrawn } from './support/each-line';

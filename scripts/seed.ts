@@ -1,7 +1,7 @@
 import { db, database, inTransaction } from '../lib/server/database';
-import { demoPlaces } from './seed/demo-places';
-import { seedAgency } from './seed/people';
-import { seedPlace } from './seed/places';
+import { DEMO_LAYOUTS, DEMO_SITES } from '../demo/demo';
+import { seedAgency } from './seed/agency';
+import { seedPlaces } from './seed/places';
 import { keepSignIns, makeSignIns } from './seed/sign-ins';
 
 /**
@@ -17,14 +17,15 @@ async function main(): Promise<void> {
   if (!folder) throw new Error('STILLGROUND_DATA is not set: the demo’s sign-ins need a folder.');
 
   const signIns = makeSignIns();
-  const places = await demoPlaces();
   await inTransaction(async (transaction) => {
     const planner = await seedAgency(signIns, transaction);
-    for (const place of places) await seedPlace(planner, place, transaction);
+    await seedPlaces(planner, transaction);
     // Before the commit: an agency whose passwords nobody knows could never be entered.
     await keepSignIns(folder, signIns);
   });
-  process.stdout.write(`Laid in the demo: ${places.length} sites, ${signIns.length} people.\n`);
+  process.stdout.write(
+    `Laid in the demo: ${DEMO_SITES.length} sites, ${DEMO_LAYOUTS.length} layouts, ${signIns.length} people.\n`,
+  );
 }
 
 main()

@@ -1,32 +1,41 @@
+import { readFile } from 'node:fs/promises';
 import type { Transaction } from 'sequelize';
-import type { Layout, SiteGround } from '../../lib/layout';
-import type { LonLat } from '../../lib/geo';
+import { DEMO_LAYOUTS, DEMO_SITES } from '../../demo/demo';
+import type { Sheet } from '../../lib/layout';
+import { parseExchange } from '../../lib/layout/exchange';
 import { insertLayout } from '../../lib/server/layouts/insert-layout';
 import { insertSite } from '../../lib/server/sites/create-site';
 import { saveGroundIn } from '../../lib/server/sites/save-ground';
-import type { Author } from './people';
+import type { Author } from './agency';
 
-/** One site of the demonstration, out of its exchange files. */
-export type DemoPlace = {
-  readonly name: string;
-  readonly where: string;
-  readonly notes: string;
-  readonly at: LonLat;
-  readonly ground: SiteGround;
-  readonly layouts: readonly Layout[];
-};
-
-export async function seedPlace(
-  author: Author,
-  place: DemoPlace,
-  transaction: Transaction,
-): Promise<string> {
-  const { name, where, notes, at, ground } = place;
-  const siteId = await insertSite(author, { name, where, notes, at }, transaction);
-  const change = { ground, label: 'Enter the ground', at: new Date() };
-  await saveGroundIn(author, siteId, 1, change, transaction);
-  for (const layout of place.layouts) {
-    await insertLayout(author, siteId, layout, 'Import a file', transaction);
+/** The demo's sites with their ground, and the layouts drawn there. */
+export async function seedPlaces(author: Author, transaction: Transaction): Promise<void> {
+  const ids = new Map<string, string>();
+  for (const { key, name, place, county, notes, ground, scene } of DEMO_SITES) {
+    const entered = { name, where: `${place}, ${county}`, notes, at: scene.origin };
+    const siteId = await insertSite(author, entered, transaction);
+    const { site } = await readSheet(ground);
+    const change = { ground: site, label: 'Enter the ground', at: new Date() };
+    await saveGroundIn(author, siteId, 1, change, transaction);
+    ids.set(key, siteId);
   }
-  return siteId;
+  // The one to meet first is saved last, because lists begin with what was saved last.
+  const end = Date.now();
+  for (const [index, { site, name, file }] of DEMO_LAYOUTS.entries()) {
+    const { layout } = await readSheet(file);
+    const at = new Date(end - index);
+    const siteId = ids.get(site);
+    if (!siteId)
+      throw new Error(`${file} belongs to the site ${site}, which the demo doesn't have.`);
+    await insertLayout(author, siteId, { ...layout, name }, 'Import a file', transaction, at);
+  }
+}
+
+async function readSheet(file: string): Promise<Sheet> {
+  const parsed = parseExchange(JSON.parse(await readFile(file, 'utf8')));
+  if (parsed.ok) return parsed.sheet;
+  const [first] = parsed.faults;
+  throw new Error(
+    `${file} has ${parsed.faults.length} faults, the first at ${first?.path}: ${first?.message}`,
+  );
 }

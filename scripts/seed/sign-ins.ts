@@ -1,7 +1,7 @@
 import { randomInt } from 'node:crypto';
 import { mkdir, rename, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
-import { TEAM } from './team';
+import { DEMO_PEOPLE } from '../../demo/demo';
 
 export type DemoSignIn = { name: string; email: string; role: string; password: string };
 
@@ -16,7 +16,7 @@ function password(): string {
 }
 
 export const makeSignIns = (): DemoSignIn[] =>
-  TEAM.map(({ name, email, role }) => ({
+  DEMO_PEOPLE.map(({ name, email, role }) => ({
     name,
     email,
     role,

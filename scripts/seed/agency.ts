@@ -1,22 +1,22 @@
 import { randomUUID } from 'node:crypto';
 import type { Transaction } from 'sequelize';
+import { DEMO_AGENCY, DEMO_KITS, DEMO_LIMITS, DEMO_PEOPLE } from '../../demo/demo';
 import { db } from '../../lib/server/database';
 import { hashPassword } from '../../lib/server/session/passwords';
 import type { DemoSignIn } from './sign-ins';
-import { AGENCY, KIT, LIMIT_SET, TEAM } from './team';
 
 export type Author = { readonly id: string; readonly agencyId: string };
 
-/** The agency with its people, kit and limits. Answers with the planner, who draws the demo. */
+/** The agency with its people, kits and limits. Answers with the planner, who draws the demo. */
 export async function seedAgency(
   signIns: readonly DemoSignIn[],
   transaction: Transaction,
 ): Promise<Author> {
   const now = new Date();
   const agencyId = randomUUID();
-  await db.Agency.create({ id: agencyId, name: AGENCY, created_at: now }, { transaction });
+  await db.Agency.create({ id: agencyId, name: DEMO_AGENCY, created_at: now }, { transaction });
   const ids = new Map<string, string>();
-  for (const [index, { name, email, role }] of TEAM.entries()) {
+  for (const [index, { name, email, role }] of DEMO_PEOPLE.entries()) {
     const id = randomUUID();
     ids.set(role, id);
     await db.Person.create(
@@ -40,25 +40,32 @@ export async function seedAgency(
     {
       agency_id: agencyId,
       number: 1,
-      ...LIMIT_SET,
-      overrides: {},
+      name: DEMO_LIMITS.name,
+      overrides: DEMO_LIMITS.values,
+      acceptance_max_ohm: DEMO_LIMITS.acceptance.max_ohm,
+      authority: DEMO_LIMITS.acceptance.authority ?? null,
       set_at: now,
       set_by: ids.get('safety-officer')!,
     },
     { transaction },
   );
-  await seedKit(agencyId, now, transaction);
+  for (const kit of DEMO_KITS) await seedKit(agencyId, kit, now, transaction);
   return { id: ids.get('planner')!, agencyId };
 }
 
-async function seedKit(agencyId: string, now: Date, transaction: Transaction): Promise<void> {
+async function seedKit(
+  agencyId: string,
+  kit: (typeof DEMO_KITS)[number],
+  now: Date,
+  transaction: Transaction,
+): Promise<void> {
   const id = randomUUID();
   await db.Kit.create(
-    { id, agency_id: agencyId, name: KIT.name, created_at: now },
+    { id, agency_id: agencyId, name: kit.name, created_at: now },
     { transaction },
   );
   await db.KitItem.bulkCreate(
-    KIT.items.map(({ kind, count, length_ft, diameter_in }, place) => ({
+    kit.items.map(({ kind, count, length_ft, diameter_in }, place) => ({
       kit_id: id,
       place,
       agency_id: agencyId,

@@ -1,12 +1,12 @@
 import {
   BURIED_REPORT_WITHIN_FT,
   DRAWN_WITHIN_FT,
-  MARK_WORDS,
   OVERHEAD_CLEARANCE,
   TRUE_POINT_RATIO,
   UNKNOWN_DIAMETER_IN,
   type Backing,
 } from '@/lib/limits';
+import { BackingWords } from './backing-words';
 
 const FIXED: readonly { title: string; value: string; backing: Backing }[] = [
   {
@@ -50,17 +50,15 @@ export function FixedNumbers() {
               {row.value}
             </dd>
             <dd className="text-ink-soft max-md:col-span-2">
-              {row.backing.source}
-              <span className="block">Mark: {MARK_WORDS[row.backing.mark]}</span>
+              <BackingWords backing={row.backing} />
             </dd>
           </div>
         ))}
       </dl>
       <h3 className="mt-6 border-b border-ink font-bold">Clearance from overhead lines</h3>
       <p className="py-2 text-ink-soft">
-        {OVERHEAD_CLEARANCE.source}. Mark: {MARK_WORDS[OVERHEAD_CLEARANCE.mark]}. A line of unknown
-        voltage is drawn at {unknownDrawnFeet} ft and stays not known; above the table only its
-        owner can say.
+        <BackingWords backing={OVERHEAD_CLEARANCE} />A line of unknown voltage is drawn at{' '}
+        {unknownDrawnFeet} ft and stays not known; above the table only its owner can say.
       </p>
       <table className="w-full max-w-md border-collapse text-left">
         <thead className="text-sm text-ink-soft">

@@ -1,6 +1,6 @@
 import { LIMIT_KEYS, type LimitKey, type LimitUnit } from '@/lib/limits';
 
-export const UNIT_WORDS: Record<LimitUnit, string> = {
+const UNIT_WORDS: Record<LimitUnit, string> = {
   ft: 'ft',
   deg: '°',
   mph: 'mph',
@@ -8,6 +8,11 @@ export const UNIT_WORDS: Record<LimitUnit, string> = {
   min: 'min',
   ratio: '',
 };
+
+/** "6 ft", "90°", "0.52". */
+export function limitWords(value: number, unit: LimitUnit): string {
+  return unit === 'deg' ? `${value}°` : `${value} ${UNIT_WORDS[unit]}`.trimEnd();
+}
 
 const GROUPS: readonly { title: string; starts: readonly string[] }[] = [
   { title: 'Spacing of systems and rods', starts: ['systems_', 'rods_'] },

@@ -1,11 +1,6 @@
-import {
-  LIMIT_TABLE,
-  MARK_WORDS,
-  type LimitEntry,
-  type LimitKey,
-  type LimitValues,
-} from '@/lib/limits';
-import { limitGroups, UNIT_WORDS } from './groups';
+import { LIMIT_TABLE, type LimitEntry, type LimitKey, type LimitValues } from '@/lib/limits';
+import { BackingWords } from './backing-words';
+import { limitGroups, limitWords } from './groups';
 
 /** Each limit with its value, the default where it differs, its mark and its source. */
 export function LimitTables({ values }: { values: LimitValues }) {
@@ -22,7 +17,6 @@ export function LimitTables({ values }: { values: LimitValues }) {
 }
 
 function LimitLine({ name, entry, value }: { name: LimitKey; entry: LimitEntry; value: number }) {
-  const unit = UNIT_WORDS[entry.unit];
   const own = value !== entry.value;
   return (
     <div
@@ -31,19 +25,16 @@ function LimitLine({ name, entry, value }: { name: LimitKey; entry: LimitEntry; 
     >
       <dt className="font-semibold">{entry.title}</dt>
       <dd className="whitespace-nowrap text-right text-lg font-bold leading-6">
-        {value}
-        {unit && ` ${unit}`}
+        {limitWords(value, entry.unit)}
         {own && (
           <span className="block text-base font-normal">
-            default {entry.value}
-            {unit && ` ${unit}`}
+            default {limitWords(entry.value, entry.unit)}
           </span>
         )}
       </dd>
       <dd className="text-ink-soft max-md:col-span-2">
         {own && <span className="text-ink">Set by the agency. Default: </span>}
-        {entry.source}
-        <span className="block">Mark: {MARK_WORDS[entry.mark]}</span>
+        <BackingWords backing={entry} />
       </dd>
     </div>
   );

@@ -1,10 +1,14 @@
 'use client';
 
 import 'leaflet/dist/leaflet.css';
+import '@/components/map-paper/map-paper.css';
 import '@/components/drawing/map/plan-map.css';
-import { MapContainer, ScaleControl, TileLayer } from 'react-leaflet';
+import { useMemo } from 'react';
+import { MapContainer, ScaleControl, TileLayer, ZoomControl } from 'react-leaflet';
 import { Graticule } from '@/components/map-paper/graticule';
 import type { SiteAnswer } from '@/lib/api';
+import type { LonLat } from '@/lib/geo';
+import { GroundOver } from './ground-over';
 
 /** Tiles are sharp up to the pack's own zoom and enlarged beyond it. */
 const CLOSEST_ZOOM = 24;
@@ -13,7 +17,8 @@ const ZOOM_WITHOUT_MAP = 17;
 /** The site's base map with what is drawn on it; plain paper where there is no map. */
 export function SitePreview({ site }: { site: SiteAnswer }) {
   const map = site.base_map;
-  if (!map && !site.at) {
+  const origin = useMemo(() => site.at ?? (map && middle(map.bounds)), [site.at, map]);
+  if (!origin) {
     return (
       <p className="border border-rule p-4">
         No position and no base map yet. The drawing still works: it is measured on a plain grid.
@@ -26,10 +31,11 @@ export function SitePreview({ site }: { site: SiteAnswer }) {
       <MapContainer
         {...(bounds
           ? { bounds, maxBounds: bounds }
-          : { center: [site.at![1], site.at![0]], zoom: ZOOM_WITHOUT_MAP })}
+          : { center: [origin[1], origin[0]], zoom: ZOOM_WITHOUT_MAP })}
         maxZoom={CLOSEST_ZOOM}
         scrollWheelZoom={false}
-        className="plan-map h-80 border border-ink lg:h-[28rem]"
+        zoomControl={false}
+        className="map-paper plan-map h-80 border border-ink lg:h-[28rem]"
       >
         {map ? (
           <TileLayer
@@ -43,7 +49,9 @@ export function SitePreview({ site }: { site: SiteAnswer }) {
         ) : (
           <Graticule />
         )}
-        <ScaleControl metric={false} />
+        <GroundOver siteId={site.id} origin={origin} />
+        <ZoomControl position="topright" />
+        <ScaleControl metric={false} position="bottomright" />
       </MapContainer>
     </section>
   );
@@ -54,4 +62,9 @@ type Bounds = NonNullable<SiteAnswer['base_map']>['bounds'];
 const corners = ([west, south, east, north]: Bounds): [[number, number], [number, number]] => [
   [south, west],
   [north, east],
+];
+
+const middle = ([west, south, east, north]: Bounds): LonLat => [
+  (west + east) / 2,
+  (south + north) / 2,
 ];

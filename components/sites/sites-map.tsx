@@ -1,10 +1,11 @@
 'use client';
 
 import 'leaflet/dist/leaflet.css';
+import '@/components/map-paper/map-paper.css';
 import L from 'leaflet';
 import { useRouter } from 'next/navigation';
 import { useEffect, useMemo } from 'react';
-import { MapContainer, ScaleControl, useMap } from 'react-leaflet';
+import { MapContainer, ScaleControl, useMap, ZoomControl } from 'react-leaflet';
 import { Graticule } from '@/components/map-paper/graticule';
 import type { SiteRow } from '@/lib/api';
 
@@ -12,7 +13,8 @@ type Placed = SiteRow & { at: NonNullable<SiteRow['at']> };
 
 /** A lone site is shown with some miles of its surroundings. */
 const CLOSEST_ZOOM = 11;
-const ROOM_FOR_NAMES: L.PointTuple = [60, 48];
+/** Names stand to the right of their marks; px. */
+const ROOM_FOR_NAMES = { left: 72, right: 190, above: 48, below: 48 } as const;
 
 /** Where the listed sites lie, on plain paper: no tiles are fetched from anywhere. */
 export function SitesMap({ sites }: { sites: readonly SiteRow[] }) {
@@ -26,10 +28,12 @@ export function SitesMap({ sites }: { sites: readonly SiteRow[] }) {
         zoom={4}
         attributionControl={false}
         scrollWheelZoom={false}
-        className="h-80 border border-ink lg:h-[28rem]"
+        zoomControl={false}
+        className="map-paper h-80 border border-ink lg:h-[28rem]"
       >
         <Graticule />
-        <ScaleControl metric={false} />
+        <ZoomControl position="topright" />
+        <ScaleControl metric={false} position="bottomright" />
         <SiteButtons sites={placed} />
       </MapContainer>
       {unplaced > 0 && (
@@ -61,7 +65,8 @@ function SiteButtons({ sites }: { sites: readonly Placed[] }) {
     }
     if (sites.length > 0) {
       map.fitBounds(L.latLngBounds(sites.map((site) => [site.at[1], site.at[0]])), {
-        padding: ROOM_FOR_NAMES,
+        paddingTopLeft: [ROOM_FOR_NAMES.left, ROOM_FOR_NAMES.above],
+        paddingBottomRight: [ROOM_FOR_NAMES.right, ROOM_FOR_NAMES.below],
         maxZoom: CLOSEST_ZOOM,
         animate: false,
       });

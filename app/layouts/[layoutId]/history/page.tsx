@@ -1,0 +1,58 @@
+import type { Metadata } from 'next';
+import { signedInPage } from '@/app/_shell/signed-in-page';
+import { SignedInSheet } from '@/app/_shell/signed-in-sheet';
+import { HistoryScreen } from '@/components/history/history-screen';
+import { ButtonLink } from '@/components/ui/button';
+import { Caution } from '@/components/ui/caution';
+import { can } from '@/lib/access';
+import { readLayout } from '@/lib/server/layouts/read-layout';
+
+export const metadata: Metadata = { title: 'History' };
+
+type Props = {
+  params: Promise<{ layoutId: string }>;
+  searchParams: Promise<{ version?: string | string[] }>;
+};
+
+export default async function HistoryPage({ params, searchParams }: Props) {
+  const { layoutId } = await params;
+  const { version } = await searchParams;
+  return signedInPage(`/layouts/${layoutId}/history`, async (person) => {
+    const layout = await readLayout(person, layoutId);
+    const name = layout.layout.name ?? 'Layout without a name';
+    return (
+      <SignedInSheet
+        person={person}
+        title={`${layout.site.name}, ${name}`}
+        status={<span className="text-alarm">DRAFT</span>}
+        cells={[{ label: 'Version', value: String(layout.version) }]}
+        caution={<Caution />}
+      >
+        <div className="flex flex-wrap items-end justify-between gap-4">
+          <div>
+            <h1 className="text-2xl font-bold">History of {name}</h1>
+            <p>{layout.site.name}</p>
+          </div>
+          <span className="flex flex-wrap gap-3">
+            <ButtonLink href={`/sites/${layout.site.id}`}>Back to the site</ButtonLink>
+            <ButtonLink href={`/layouts/${layoutId}`} look="action">
+              Open the drawing
+            </ButtonLink>
+          </span>
+        </div>
+        <HistoryScreen
+          layoutId={layoutId}
+          newest={layout.version}
+          shown={shownVersion(version, layout.version)}
+          mayDraw={can(person.role, 'layout.draw')}
+        />
+      </SignedInSheet>
+    );
+  });
+}
+
+/** The version the address asks for; the newest where it asks for none that can be. */
+function shownVersion(asked: string | string[] | undefined, newest: number): number {
+  const version = Number(asked);
+  return Number.isInteger(version) && version >= 1 && version <= newest ? version : newest;
+}

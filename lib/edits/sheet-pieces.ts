@@ -12,11 +12,15 @@ export function requirePiece(sheet: Sheet, id: string): Piece {
 
 /** Puts changed pieces in the places of those with their ids. */
 export function withPieces(sheet: Sheet, changed: ReadonlyMap<string, Piece>): Sheet {
+  const ofSite = [...changed.values()].filter((piece) => isSiteKind(piece.kind)).length;
   const swap = <P extends Piece>(pieces: P[]): P[] =>
-    pieces.some((piece) => changed.has(piece.id))
-      ? pieces.map((piece) => (changed.get(piece.id) as P | undefined) ?? piece)
-      : pieces;
-  return withLists(sheet, swap(sheet.layout.pieces), swap(sheet.site.features));
+    pieces.map((piece) => (changed.get(piece.id) as P | undefined) ?? piece);
+  // A site may hold tens of thousands of lines: they are not walked while a rod is dragged.
+  return withLists(
+    sheet,
+    ofSite < changed.size ? swap(sheet.layout.pieces) : sheet.layout.pieces,
+    ofSite > 0 ? swap(sheet.site.features) : sheet.site.features,
+  );
 }
 
 export function withAdded(sheet: Sheet, added: readonly Piece[]): Sheet {

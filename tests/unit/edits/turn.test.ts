@@ -19,13 +19,17 @@ test.each([
   expect(findPiece(applyEdit(sheet, turn('cv', given)), 'cv')).toMatchObject({ heading_deg: kept });
 });
 
-test('clamps and the release point turn with it and stay as far from its centre', () => {
-  const after = applyEdit(sheet, turn('cv', 150));
+test('clamps and the release point on it turn with it and stay as far from its centre', () => {
+  const leaking = applyEdit(sheet, {
+    type: 'move',
+    moves: [{ id: 'rp', to: [-98.29995, 41.20002] }],
+  });
+  const after = applyEdit(leaking, turn('cv', 150));
   const centre = plane.toPlane(pieceOf(after, 'cv', 'casualty-vehicle').at);
   const ring = footprintOf(plane, pieceOf(after, 'cv', 'casualty-vehicle'));
   const away = (place: LonLat): number => distance(plane.toPlane(place), centre);
   for (const id of ['g1', 'b1', 'h1']) {
-    const [was, is] = [sheet, after].map((s) => {
+    const [was, is] = [leaking, after].map((s) => {
       const run = findPiece(s, id);
       return run && 'path' in run ? run.path[0]! : s.layout.origin;
     });
@@ -33,8 +37,9 @@ test('clamps and the release point turn with it and stay as far from its centre'
     expect(away(is!)).toBeCloseTo(away(was!), 2);
     expect(footprintToPoint(ring, plane.toPlane(is!))).toBeLessThan(0.003);
   }
-  const leak = pieceOf(after, 'rp', 'release-point').at;
-  expect(away(leak)).toBeCloseTo(away(pieceOf(sheet, 'rp', 'release-point').at), 2);
+  const [leaked, leak] = [leaking, after].map((s) => pieceOf(s, 'rp', 'release-point').at);
+  expect(leak).not.toEqual(leaked);
+  expect(away(leak!)).toBeCloseTo(away(leaked!), 2);
 });
 
 test('turned to where it points changes nothing, 360 for 0 and not entered included', () => {

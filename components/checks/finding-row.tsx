@@ -10,7 +10,8 @@ import { needsAttention } from './count-findings';
 import { EnterHere } from './enter/enter-here';
 import { Gauge } from './gauge';
 import { lineWords, pieceOf } from './line-words';
-import { allowedWords, valueWords } from './measure-words';
+import { allowedWords } from './measure-words';
+import { lineValue } from './value-words';
 import { Why } from './why';
 
 /**
@@ -34,7 +35,8 @@ export function FindingRow({
   const whyId = useId();
   const attention = needsAttention(finding.status);
   const ink = STATUS_INK[finding.status];
-  const allowed = finding.allowed && allowedWords(finding.allowed);
+  const counted = finding.measured?.unit === 'count';
+  const allowed = finding.allowed && !counted ? allowedWords(finding.allowed) : null;
 
   const point = (at: boolean): void => store.getState().showFinding(at ? finding.id : null);
   const press = (): void => {
@@ -57,17 +59,17 @@ export function FindingRow({
         aria-expanded={why}
         aria-controls={whyId}
         onClick={press}
-        className="pointer-coarse:min-h-11 grid min-h-7 w-full cursor-pointer grid-cols-[1.125rem_minmax(0,1fr)_auto] items-baseline gap-x-1.5 text-left leading-snug"
+        className="pointer-coarse:min-h-11 grid min-h-7 w-full cursor-pointer grid-cols-[1.125rem_minmax(0,1fr)_auto] items-start gap-x-1.5 text-left leading-snug"
       >
-        <StatusShape status={finding.status} />
+        <span className="pt-px">
+          <StatusShape status={finding.status} />
+        </span>
         <span>
           <span className="sr-only">{STATUS_WORDS[finding.status]}: </span>
           {words}
         </span>
         <strong className={`whitespace-nowrap pl-2 text-lg leading-tight ${ink}`}>
-          {finding.measured
-            ? valueWords(finding.measured, finding.allowed, finding.status === 'meets')
-            : finding.status === 'not-known' && 'not known'}
+          {lineValue(finding)}
         </strong>
       </button>
       <Gauge finding={finding} />

@@ -27,12 +27,16 @@ export function FoldedRow({ row, offered }: { row: Row; offered: ReadonlySet<Mis
         aria-expanded={open}
         aria-controls={listId}
         onClick={() => setOpen(!open)}
-        className="pointer-coarse:min-h-11 grid min-h-7 w-full cursor-pointer grid-cols-[1.125rem_minmax(0,1fr)_auto] items-baseline gap-x-1.5 text-left leading-snug"
+        className="pointer-coarse:min-h-11 grid min-h-7 w-full cursor-pointer grid-cols-[1.125rem_minmax(0,1fr)_auto] items-start gap-x-1.5 text-left leading-snug"
       >
-        <StatusShape status={status} />
+        <span className="pt-px">
+          <StatusShape status={status} />
+        </span>
         <span>
           <span className="sr-only">{STATUS_WORDS[status]}: </span>
-          {words} <Chevron open={open} />
+          {words}
+          {'\u00a0'}
+          <Chevron open={open} />
         </span>
         <strong className={`whitespace-nowrap pl-2 text-lg leading-tight ${STATUS_INK[status]}`}>
           {rangeWords(findings) ?? (status === 'not-known' && 'not known')}

@@ -33,7 +33,21 @@ export function valueWords(
   while (!meets && allowed && decimals < MOST_DECIMALS && looksWithin(value, decimals, allowed)) {
     decimals += 1;
   }
+  if (!meets && allowed && looksWithin(value, decimals, allowed)) return barely(value, allowed);
   return plainNumber(value, decimals) + SUFFIX[unit];
+}
+
+/** Short of the limit by less than can be written. */
+function barely(value: number, { min, max, unit }: Allowed): string {
+  if (min !== null && value < min) return `under ${limitNumber(min)}${SUFFIX[unit]}`;
+  return max === null
+    ? limitNumber(value) + SUFFIX[unit]
+    : `over ${limitNumber(max)}${SUFFIX[unit]}`;
+}
+
+/** How a count is said beside its line: how many of how many, and nothing where it is as it should be. */
+export function countWords(value: number, { min }: Allowed): string {
+  return min === null ? plainNumber(value, 0) : `${plainNumber(value, 0)} of ${limitNumber(min)}`;
 }
 
 const looksWithin = (value: number, decimals: number, { min, max }: Allowed): boolean => {
@@ -43,7 +57,7 @@ const looksWithin = (value: number, decimals: number, { min, max }: Allowed): bo
 };
 
 /** A limit as it was set: no trailing zeros. */
-export const limitNumber = (value: number): string => plainNumber(Number(value.toFixed(3)), null);
+export const limitNumber = (value: number): string => plainNumber(Number(value.toFixed(2)), null);
 
 /** "3 to 6 ft", "at least 10 ft", "at most 90°". */
 export function allowedWords({ min, max, unit }: Allowed): string | null {

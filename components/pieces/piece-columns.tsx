@@ -42,7 +42,9 @@ export const columns = column.columns([
     header: 'Status',
     cell: ({ row }) => (
       <>
-        <StatusMark status={row.original.worst} />
+        <StatusMark status={row.original.worst}>
+          {row.original.worst === 'n/a' ? 'no check' : undefined}
+        </StatusMark>
         {row.original.worstWords && <span className="block">{row.original.worstWords}</span>}
       </>
     ),

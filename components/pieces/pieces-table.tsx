@@ -116,7 +116,7 @@ function SortableHeader({
       <button
         type="button"
         onClick={onSort}
-        className="pointer-coarse:min-h-11 inline-flex min-h-8 cursor-pointer items-center gap-1 font-bold"
+        className="pointer-coarse:min-h-11 inline-flex min-h-8 cursor-pointer items-center gap-1 text-left font-bold"
       >
         {children}
         <svg viewBox="0 0 10 10" width="10" height="10" aria-hidden="true" className="fill-ink">

@@ -22,7 +22,7 @@ describe('words for values', () => {
     const least = { min: 25, max: null, unit: 'ft' } as const;
     expect(valueWords(ft(24.97), least, false)).toBe('24.97 ft');
     expect(valueWords(ft(24.2), least, false)).toBe('24.2 ft');
-    expect(valueWords(ft(24.9999), least, false)).toBe('25.000 ft');
+    expect(valueWords(ft(24.9999), least, false)).toBe('under 25 ft');
     const most = { min: null, max: 90, unit: 'deg' } as const;
     expect(valueWords({ value: 90.2, unit: 'deg' }, most, false)).toBe('90.2°');
   });

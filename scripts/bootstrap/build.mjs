@@ -87,7 +87,7 @@ export async function ensureBuild(root, env) {
   rmSync(join(root, STAMP), { force: true });
   // Types left by a development server that was killed would fail the build's own type check.
   rmSync(join(root, '.next', 'dev', 'types'), { recursive: true, force: true });
-  await step(`Building the application (${fault}; a minute or two)`, async () => {
+  await step(`Building the application (${fault}; one to three minutes)`, async () => {
     const { code, output } = await runTool(root, 'next', ['build'], {
       env: { ...env, NODE_ENV: 'production' },
     });

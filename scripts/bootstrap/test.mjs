@@ -39,6 +39,7 @@ export async function test() {
     TZ: 'UTC',
     NEXT_TELEMETRY_DISABLED: '1',
     NO_COLOR: '1',
+    VITE_CONFIG_NATIVE_IGNORE_WARNING: 'true',
     STILLGROUND_DATA: dataFolder,
     TEST_DATABASE_URL: database.rootUrl,
     CHROMIUM: findCommand('chromium') ?? '',

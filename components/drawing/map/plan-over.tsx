@@ -6,9 +6,9 @@ import { handleAt, handlesOf } from '@/lib/client/handles';
 import { piecesAt, REACH_PX } from '@/lib/client/hit-test';
 import { guideOf, type Under } from '@/lib/client/tools';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
-import { drawLayout, drawSite, joined } from '@/lib/draw';
+import { drawGrid, drawLayout, drawSite, joined, type Bounds } from '@/lib/draw';
 import type { LocalPlane } from '@/lib/geo';
-import { emptyLayout, findPiece, isSiteKind } from '@/lib/layout';
+import { emptyLayout, findPiece, isSiteKind, unitOf } from '@/lib/layout';
 import { useTheme } from '@/components/ui/use-theme';
 import { pieceName } from '../piece-words';
 import { GlideWith } from './glide-with';
@@ -42,10 +42,16 @@ export function PlanOver({ plane }: { plane: LocalPlane }) {
   const mayDraw = useDrawing((state) => state.canDraw);
   const mayChangeSite = useDrawing((state) => state.canChangeSite);
   const moving = useDrawing((state) => state.preview !== null);
+  const hasBaseMap = useDrawing((state) => state.meta.baseMap !== null);
   const tool = usePlanTool();
   const { site, layout } = sheet;
   const { origin } = layout;
 
+  const casualty = unitOf(layout, 'C');
+  const from = useMemo(
+    () => (casualty ? plane.toPlane(casualty.at) : { x: 0, y: 0 }),
+    [casualty, plane],
+  );
   const frame = useMemo(
     () => view && { metresPerPx: view.metresPerPx, bounds: view.bounds },
     [view],
@@ -57,6 +63,13 @@ export function PlanOver({ plane }: { plane: LocalPlane }) {
         ? drawSite({ sheet: { layout: emptyLayout(origin), site }, limits, view: frame })
         : NOTHING,
     [site, origin, limits, frame],
+  );
+  const grid = useMemo(
+    () =>
+      frame && !hasBaseMap
+        ? drawGrid({ ...frame, bounds: widened(frame.bounds) }, 'ft', from)
+        : NOTHING,
+    [frame, hasBaseMap, from],
   );
   const plan = useMemo(
     () =>
@@ -78,7 +91,7 @@ export function PlanOver({ plane }: { plane: LocalPlane }) {
     moving && selected?.kind === 'rod' ? jumperBand(sheet, selected, plane, limits) : null;
   const hand = handList(handles, guide, band, plane);
 
-  const groundShapes = useMemo(() => withoutWords(ground), [ground]);
+  const groundShapes = useMemo(() => withoutWords(joined(grid, ground)), [grid, ground]);
   const planShapes = useMemo(() => withoutWords(plan), [plan]);
   const words = useMemo(() => onlyWords(joined(ground, plan)), [ground, plan]);
 
@@ -117,4 +130,10 @@ export function PlanOver({ plane }: { plane: LocalPlane }) {
       </GlideWith>
     </>
   );
+}
+
+/** As much again on every side, so that a pan does not run off the grid before it rests. */
+function widened({ min, max }: Bounds): Bounds {
+  const [w, h] = [max.x - min.x, max.y - min.y];
+  return { min: { x: min.x - w, y: min.y - h }, max: { x: max.x + w, y: max.y + h } };
 }

@@ -2,6 +2,7 @@
 
 import { redoLabel, undoLabel } from '@/lib/edits';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
+import { useDecide } from '../saving/keep-saved';
 import type { SaveStatus } from '@/lib/client/saving/save-state';
 
 const QUIET =
@@ -37,7 +38,20 @@ export function SaveLine() {
 /** Where the drawing is kept at this moment; loud where the server does not have it. */
 export function SaveWords() {
   const save = useDrawing((state) => state.save);
+  const decide = useDecide();
   const loud = LOUD.includes(save.status);
+  if (save.status === 'stale') {
+    return (
+      <button
+        type="button"
+        data-save="stale"
+        className="min-h-9 cursor-pointer bg-ink px-2 text-left font-semibold leading-tight text-paper underline"
+        onClick={decide}
+      >
+        {save.words}
+      </button>
+    );
+  }
   return (
     <p
       role="status"

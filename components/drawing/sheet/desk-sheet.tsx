@@ -1,0 +1,52 @@
+'use client';
+
+import { ChecksPanel } from '@/components/checks/checks-panel';
+import { ConditionsPanel } from '@/components/conditions';
+import { KitShelf } from '@/components/kit';
+import { FloatingTag } from '../tag/floating-tag';
+import { Complaint } from './complaint';
+import { IndexTabs } from './index-tabs';
+import { More } from './more';
+import { PiecesSheet } from './pieces-sheet';
+import { PlanFrame } from './plan-frame';
+import { SaveLine } from './save-line';
+import { ScaledTitleBlock } from './scaled-title-block';
+
+/** The sheet on a desk: plan in its ruled frame, strip at the right, kit in the bottom margin. */
+export function DeskSheet() {
+  return (
+    <>
+      <div className="h-dvh min-h-[38rem] p-2">
+        <div className="grid h-full grid-cols-[minmax(0,1fr)_24.5rem] border border-rule">
+          <main className="flex min-h-0 min-w-0 flex-col" aria-label="Plan">
+            <div className="flex min-w-0 items-end justify-between gap-4 pl-8 pr-4 pt-1.5">
+              <IndexTabs />
+              <div className="flex min-w-0 items-center gap-3">
+                <SaveLine />
+                <More />
+              </div>
+            </div>
+            <Complaint />
+            <div className="min-h-0 grow">
+              <PlanFrame>
+                <FloatingTag />
+              </PlanFrame>
+            </div>
+            <KitShelf />
+          </main>
+          <aside
+            aria-label="Conditions, checks and title"
+            className="flex min-h-0 flex-col border-l-2 border-ink"
+          >
+            <ConditionsPanel />
+            <div className="flex min-h-0 grow flex-col border-t border-ink">
+              <ChecksPanel />
+            </div>
+            <ScaledTitleBlock />
+          </aside>
+        </div>
+      </div>
+      <PiecesSheet />
+    </>
+  );
+}

@@ -1,4 +1,5 @@
-import { mkdtemp, readFile, rm, writeFile } from 'node:fs/promises';
+import { rmSync } from 'node:fs';
+import { mkdtemp, readFile, writeFile } from 'node:fs/promises';
 import { createRequire } from 'node:module';
 import { tmpdir } from 'node:os';
 import { basename, join } from 'node:path';
@@ -11,14 +12,19 @@ const FILES = ['400', '600'].map(
   (weight) => `@fontsource/source-sans-3/files/source-sans-3-latin-${weight}-normal.woff`,
 );
 
+let ready: Promise<void> | undefined;
+
 /**
  * Lets the rasteriser see the shipped font and nothing else, so that a map reads the same on every
  * machine. It finds fonts through fontconfig, which looks in folders and can't read WOFF; so the
- * files are unpacked to a folder of their own. Must run before the process draws its first words:
- * fontconfig reads its settings once. Answers how to tidy up.
+ * files are unpacked to a folder of their own, which goes when the process ends. Must be awaited
+ * before the process draws its first words: fontconfig reads its settings once.
  */
-export async function useShippedFont(): Promise<() => Promise<void>> {
+export const readyMapFont = (): Promise<void> => (ready ??= unpackFont());
+
+async function unpackFont(): Promise<void> {
   const folder = await mkdtemp(join(tmpdir(), 'map-font-'));
+  process.once('exit', () => rmSync(folder, { recursive: true, force: true }));
   const find = createRequire(import.meta.url).resolve;
   for (const file of FILES) {
     const name = basename(file).replace('.woff', '.ttf');
@@ -30,7 +36,6 @@ export async function useShippedFont(): Promise<() => Promise<void>> {
     `<?xml version="1.0"?><fontconfig><dir>${folder}</dir><cachedir>${folder}</cachedir></fontconfig>`,
   );
   process.env.FONTCONFIG_FILE = settings;
-  return () => rm(folder, { recursive: true, force: true });
 }
 
 /** A WOFF 1.0 file (W3C, 2012) is a TrueType file with each table deflated. */

@@ -1,18 +1,14 @@
 import sharp from 'sharp';
-import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import { beforeAll, describe, expect, test } from 'vitest';
 import { localPlane } from '@/lib/geo';
 import { drawBaseMap, versionOf, type DrawnTile } from '@/tiles/draw-base-map';
-import { MAP_FONT, useShippedFont } from '@/tiles/map-font';
+import { MAP_FONT, readyMapFont } from '@/tiles/map-font';
 import { TILE_PX, tileAt } from '@/tiles/mercator';
 import { boxOf, penFor, projection } from '@/tiles/pen';
 import type { Scene } from '@/tiles/scene';
 import { sorrelCreekRamp } from '@/tiles/scenes';
 
-let tidyUp: () => Promise<void>;
-beforeAll(async () => {
-  tidyUp = await useShippedFont();
-});
-afterAll(() => tidyUp());
+beforeAll(readyMapFont);
 
 describe('a point of the ground', () => {
   const project = projection(sorrelCreekRamp.origin);

@@ -51,7 +51,7 @@ export function SitePreview({ site }: { site: SiteAnswer }) {
         )}
         <GroundOver siteId={site.id} origin={origin} />
         <ZoomControl position="topright" />
-        <ScaleControl metric={false} position="bottomright" />
+        <ScaleControl metric={false} position="topleft" />
       </MapContainer>
     </section>
   );

@@ -8,6 +8,7 @@ import { useEffect, useMemo } from 'react';
 import { MapContainer, ScaleControl, useMap, ZoomControl } from 'react-leaflet';
 import { Graticule } from '@/components/map-paper/graticule';
 import type { SiteRow } from '@/lib/api';
+import { nameSides } from './name-sides';
 
 type Placed = SiteRow & { at: NonNullable<SiteRow['at']> };
 
@@ -33,7 +34,7 @@ export function SitesMap({ sites }: { sites: readonly SiteRow[] }) {
       >
         <Graticule />
         <ZoomControl position="topright" />
-        <ScaleControl metric={false} position="bottomright" />
+        <ScaleControl metric={false} position="topleft" />
         <SiteButtons sites={placed} />
       </MapContainer>
       {unplaced > 0 && (
@@ -51,27 +52,34 @@ function SiteButtons({ sites }: { sites: readonly Placed[] }) {
   const router = useRouter();
   useEffect(() => {
     const layer = L.layerGroup().addTo(map);
-    for (const site of sites) {
+    const marks = sites.map((site) => {
       const [lon, lat] = site.at;
-      L.marker([lat, lon], {
-        keyboard: false,
-        interactive: false,
-        icon: L.divIcon({
-          className: 'site-mark',
-          iconSize: [0, 0],
-          html: siteButton(site.name, () => router.push(`/sites/${site.id}`)),
-        }),
-      }).addTo(layer);
-    }
+      const at = L.latLng(lat, lon);
+      const html = siteButton(site.name, () => router.push(`/sites/${site.id}`));
+      const icon = L.divIcon({ className: 'site-mark', iconSize: [0, 0], html });
+      L.marker(at, { keyboard: false, interactive: false, icon }).addTo(layer);
+      return { at, button: html };
+    });
+    const sideNames = () => {
+      const spots = marks.map(({ at }) => map.latLngToContainerPoint(at));
+      nameSides(spots).forEach((side, i) => {
+        marks[i]?.button.classList.toggle('name-left', side === 'left');
+      });
+    };
     if (sites.length > 0) {
-      map.fitBounds(L.latLngBounds(sites.map((site) => [site.at[1], site.at[0]])), {
+      map.fitBounds(L.latLngBounds(marks.map(({ at }) => at)), {
         paddingTopLeft: [ROOM_FOR_NAMES.left, ROOM_FOR_NAMES.above],
         paddingBottomRight: [ROOM_FOR_NAMES.right, ROOM_FOR_NAMES.below],
         maxZoom: CLOSEST_ZOOM,
         animate: false,
       });
     }
-    return () => void layer.remove();
+    sideNames();
+    map.on('zoomend', sideNames);
+    return () => {
+      map.off('zoomend', sideNames);
+      layer.remove();
+    };
   }, [map, router, sites]);
   return null;
 }

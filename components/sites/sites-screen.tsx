@@ -39,9 +39,13 @@ export function SitesScreen({ mayChange }: { mayChange: boolean }) {
             )}
           </Field>
           {list.error && <Problems problem={list.error} className="mt-4" />}
-          <p role="status" className="mt-4 text-ink-soft">
-            {list.isLoading ? 'Fetching the sites' : countWords(sites.length, list.hasMore, asked)}
-          </p>
+          {!list.error && (
+            <p role="status" className="mt-4 text-ink-soft">
+              {list.isLoading
+                ? 'Fetching the sites'
+                : countWords(sites.length, list.hasMore, asked)}
+            </p>
+          )}
           {sites.length > 0 && <SitesTable sites={sites} />}
           {list.hasMore && (
             <Button className="mt-4" onClick={() => void list.more()}>

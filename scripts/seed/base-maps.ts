@@ -1,6 +1,6 @@
 import { DEMO_AGENCY, DEMO_SITES } from '../../demo/demo';
 import { db } from '../../lib/server/database';
-import { importScene } from '../../lib/server/tiles/import-scene';
+import { importScene } from '../../tiles/import-scene';
 
 /**
  * Draws the demo sites' base maps where they are missing or were drawn by an older version. It

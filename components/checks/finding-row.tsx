@@ -48,7 +48,7 @@ export function FindingRow({
   return (
     <li
       data-status={finding.status}
-      className={`py-0.5 ${shown ? 'bg-rule-faint/60' : ''}`}
+      className={`py-px ${shown ? 'bg-rule-faint/60' : ''}`}
       onPointerEnter={() => point(true)}
       onPointerLeave={() => point(false)}
       onFocus={() => point(true)}
@@ -59,7 +59,7 @@ export function FindingRow({
         aria-expanded={why}
         aria-controls={whyId}
         onClick={press}
-        className="pointer-coarse:min-h-11 grid min-h-7 w-full cursor-pointer grid-cols-[1.125rem_minmax(0,1fr)_auto] items-start gap-x-1.5 text-left leading-snug"
+        className="pointer-coarse:min-h-11 grid min-h-6 w-full cursor-pointer grid-cols-[1.125rem_minmax(0,1fr)_auto] items-start gap-x-1.5 text-left leading-snug"
       >
         <span className="pt-px">
           <StatusShape status={finding.status} />

@@ -21,22 +21,20 @@ export function FoldedRow({ row, offered }: { row: Row; offered: ReadonlySet<Mis
   const { status } = findings[0];
   const words = useDrawing((s) => foldWords(s.sheet, title, findings));
   return (
-    <li data-status={status} className="py-0.5">
+    <li data-status={status} className="py-px">
       <button
         type="button"
         aria-expanded={open}
         aria-controls={listId}
         onClick={() => setOpen(!open)}
-        className="pointer-coarse:min-h-11 grid min-h-7 w-full cursor-pointer grid-cols-[1.125rem_minmax(0,1fr)_auto] items-start gap-x-1.5 text-left leading-snug"
+        className="pointer-coarse:min-h-11 grid min-h-6 w-full cursor-pointer grid-cols-[1.125rem_minmax(0,1fr)_auto] items-start gap-x-1.5 text-left leading-snug"
       >
         <span className="pt-px">
           <StatusShape status={status} />
         </span>
         <span>
           <span className="sr-only">{STATUS_WORDS[status]}: </span>
-          {words}
-          {'\u00a0'}
-          <Chevron open={open} />
+          <WithChevron words={words} open={open} />
         </span>
         <strong className={`whitespace-nowrap pl-2 text-lg leading-tight ${STATUS_INK[status]}`}>
           {rangeWords(findings) ?? (status === 'not-known' && 'not known')}
@@ -59,6 +57,19 @@ export function FoldedRow({ row, offered }: { row: Row; offered: ReadonlySet<Mis
           ))}
       </ul>
     </li>
+  );
+}
+
+/** The sign keeps to the last word, so that it never stands on a line of its own. */
+function WithChevron({ words, open }: { words: string; open: boolean }) {
+  const cut = words.lastIndexOf(' ') + 1;
+  return (
+    <>
+      {words.slice(0, cut)}
+      <span className="whitespace-nowrap">
+        {words.slice(cut)} <Chevron open={open} />
+      </span>
+    </>
   );
 }
 

@@ -7,7 +7,7 @@ const DECIMALS: Record<MeasureUnit, number> = {
   ratio: 2,
   count: 0,
   min: 0,
-  ohm: 1,
+  ohm: 0,
 };
 const MOST_DECIMALS = 3;
 

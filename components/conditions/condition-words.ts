@@ -39,7 +39,7 @@ export function seenWords(
   const clock = clockWords(observedAt, asOf, zone);
   if (asOf === null) return { words: `seen ${clock}`, fresh: 'fresh' };
   const age = minutesBetween(observedAt, asOf);
-  if (age < 0) return { words: `seen ${clock}, which is still to come`, fresh: 'ahead' };
+  if (age < 0) return { words: `seen ${clock}, still to come`, fresh: 'ahead' };
   const ago = age < 1 ? 'just now' : `${spanWords(age)} ago`;
   return { words: `seen ${clock}, ${ago}`, fresh: age <= freshMinutes ? 'fresh' : 'stale' };
 }

@@ -26,7 +26,7 @@ export function ConditionsPanel() {
   };
 
   return (
-    <section aria-label="Conditions" className="px-4 py-2.5">
+    <section aria-label="Conditions" className="relative px-4 py-2.5">
       <div className="grid grid-cols-[minmax(8rem,10rem)_minmax(0,1fr)] gap-4">
         <Dial
           conditions={conditions}
@@ -44,12 +44,18 @@ export function ConditionsPanel() {
               aria-controls={formId}
               onClick={() => setTyping(!typing)}
             >
-              {typing ? 'Done' : 'Type them in'}
+              {typing ? 'Done' : 'Type in'}
+              <span className="sr-only"> conditions</span>
             </button>
           )}
         </ConditionsWords>
       </div>
-      <div id={formId} hidden={!typing}>
+      <div
+        id={formId}
+        hidden={!typing}
+        // Over the checks where the strip is a column: they must not be squeezed out of it.
+        className="lg:absolute lg:inset-x-0 lg:top-full lg:z-20 lg:border-y lg:border-ink lg:bg-margin lg:px-4 lg:pb-4"
+      >
         {typing && <ConditionsForm />}
       </div>
     </section>

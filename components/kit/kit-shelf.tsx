@@ -67,7 +67,7 @@ function FromTheKit() {
 }
 
 function Left({ left }: { left: number | null }) {
-  if (left === null) return <span className="block text-sm">no kit</span>;
+  if (left === null) return null;
   const words = left > 0 ? `${left} left` : left === 0 ? 'none left' : `${-left} short`;
   return (
     <span
@@ -85,28 +85,24 @@ function OnTheGround() {
   const { tabIndexOf, onFocus, onKeyDown } = useRoving(items.length);
   return (
     <div
-      className={`${ROW} mt-0.5 border-t border-rule-faint pt-0.5 lg:flex-wrap lg:overflow-visible`}
+      role="toolbar"
+      aria-label="On the ground"
+      className={`${ROW} mt-0.5 !gap-x-0.5 border-t border-rule-faint pt-0.5 lg:flex-wrap lg:overflow-visible`}
+      onKeyDown={onKeyDown}
     >
-      <div
-        role="toolbar"
-        aria-label="On the ground"
-        className="flex shrink-0 gap-x-0.5 lg:shrink lg:flex-wrap"
-        onKeyDown={onKeyDown}
-      >
-        {items.map((item, place) => (
-          <ShelfButton
-            key={item.key}
-            small
-            inHand={item.inHand}
-            words={item.words}
-            note={item.drawn && <span className="sr-only"> drawn</span>}
-            disabled={item.drawn}
-            tabIndex={tabIndexOf(place)}
-            onFocus={() => onFocus(place)}
-          />
-        ))}
-      </div>
-      <PumpChoice className="w-56 shrink-0" />
+      {items.map((item, place) => (
+        <ShelfButton
+          key={item.key}
+          small
+          inHand={item.inHand}
+          words={item.words}
+          note={item.drawn && <span className="sr-only"> drawn</span>}
+          disabled={item.drawn}
+          tabIndex={tabIndexOf(place)}
+          onFocus={() => onFocus(place)}
+        />
+      ))}
+      <PumpChoice className="ml-auto w-52 shrink-0" />
     </div>
   );
 }

@@ -14,6 +14,8 @@ export function useRoving(count: number): {
   const stop = Math.min(current, Math.max(0, count - 1));
 
   const onKeyDown = (event: KeyboardEvent<HTMLElement>): void => {
+    // What else stands in the row (a choice) keeps its own arrow keys.
+    if (!(event.target as HTMLElement).hasAttribute('data-stop')) return;
     const by = BY[event.key];
     const to =
       by !== undefined

@@ -38,7 +38,7 @@ export function TitleBlock({
   const toggle = (what: 'liquid' | 'time'): void => setEditing(editing === what ? null : what);
 
   return (
-    <section aria-label="Title block" className="border-t-2 border-ink bg-paper">
+    <section aria-label="Title block" className="relative border-t-2 border-ink bg-paper">
       <div className="flex items-baseline justify-between gap-3 border-b border-ink px-3 py-1.5">
         <h2 className="min-w-0 text-lg font-bold leading-tight">
           <InPlace
@@ -57,8 +57,8 @@ export function TitleBlock({
         </h2>
         <p className="shrink-0 text-lg font-bold leading-tight text-alarm">DRAFT</p>
       </div>
-      <Verdict />
-      <dl className="grid grid-cols-[1fr_auto_1fr] text-[15px] leading-tight">
+      <Verdict field={field} />
+      <dl className="grid grid-cols-[1.7fr_1fr_1fr] text-[15px] leading-tight">
         <Cell label="Liquid" className="col-span-2">
           <Change
             words={liquidWords(layout.liquid)}
@@ -78,7 +78,7 @@ export function TitleBlock({
         </Cell>
         <Cell label="Drawn by">{meta.drawnBy ?? '–'}</Cell>
         <Cell label="Checked by">–</Cell>
-        <Cell label="Revision">draft, not approved</Cell>
+        <Cell label="Revision">draft</Cell>
         <Cell label={meta.agencyName} className={metresPerPx === null ? 'col-span-3' : ''}>
           <Change
             words={layout.planned_at ? dateTimeWords(layout.planned_at) : null}
@@ -95,7 +95,21 @@ export function TitleBlock({
           </div>
         )}
       </dl>
-      <div id={editorId} hidden={editing === null} className="border-b border-ink px-3 py-2">
+      <div
+        id={editorId}
+        hidden={editing === null}
+        // Over the checks where the strip is a column: they must not be squeezed out of it.
+        className="border-t border-ink px-3 py-2 lg:absolute lg:inset-x-0 lg:bottom-full lg:z-20 lg:border-b lg:bg-paper lg:pb-4"
+      >
+        <div className="flex justify-end">
+          <button
+            type="button"
+            className="pointer-coarse:min-h-11 min-h-8 cursor-pointer underline underline-offset-4"
+            onClick={() => setEditing(null)}
+          >
+            Done
+          </button>
+        </div>
         {editing === 'liquid' && <LiquidFields />}
         {editing === 'time' && (
           <TimeEntry
@@ -111,7 +125,6 @@ export function TitleBlock({
           />
         )}
       </div>
-      <Caution field={field} className="px-3 py-1 text-sm leading-tight" />
     </section>
   );
 }
@@ -166,15 +179,18 @@ function Change({
   );
 }
 
-/** Said only when every check answered and none asks for anything. */
-function Verdict() {
+/** Said only when every check answered and none asks for anything; never without the caution. */
+function Verdict({ field }: { field: boolean }) {
   const findings = useDrawing((s) => s.findings);
   const agency = useDrawing((s) => s.meta.agencyName);
   const words = useMemo(() => verdictWords(countFindings(findings), agency), [findings, agency]);
   if (!words) return null;
   return (
-    <p className="border-b border-ink px-3 py-1.5 text-lg font-bold leading-tight text-spruce">
-      <StatusShape status="meets" /> {words}
-    </p>
+    <div className="border-b border-ink px-3 py-1.5">
+      <p className="text-lg font-bold leading-tight text-spruce">
+        <StatusShape status="meets" /> {words}
+      </p>
+      <Caution field={field} className="pt-1 text-sm leading-tight" />
+    </div>
   );
 }

@@ -43,7 +43,7 @@ describe('conditions in words', () => {
       'seen 2031-05-03 13:00, 25 h 02 min ago',
       'stale',
     ],
-    ['2031-05-04T14:10:00Z', '2031-05-04T14:02:00Z', 'seen 14:10, which is still to come', 'ahead'],
+    ['2031-05-04T14:10:00Z', '2031-05-04T14:02:00Z', 'seen 14:10, still to come', 'ahead'],
   ])('seen %s, asked at %s', (seen, asOf, words, fresh) => {
     expect(seenWords(seen, asOf, 30, 'UTC')).toEqual({ words, fresh });
   });

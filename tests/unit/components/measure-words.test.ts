@@ -10,7 +10,7 @@ describe('words for values', () => {
     [{ value: 0.618, unit: 'ratio' } as const, '0.62'],
     [{ value: 2, unit: 'count' } as const, '2'],
     [{ value: 9.4, unit: 'min' } as const, '9 min'],
-    [{ value: 25, unit: 'ohm' } as const, '25.0 Ω'],
+    [{ value: 25, unit: 'ohm' } as const, '25 Ω'],
     [{ value: -4.31, unit: 'ft' } as const, '−4.3 ft'],
     [{ value: -0.01, unit: 'ft' } as const, '0.0 ft'],
     [{ value: 1234.56, unit: 'ft' } as const, '1,234.6 ft'],

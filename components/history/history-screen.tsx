@@ -8,21 +8,22 @@ import { Notice } from '@/components/ui/notice';
 import { Problems } from '@/components/ui/problems';
 import { When } from '@/components/ui/when';
 import { Problem, restoreVersion, useChanges } from '@/lib/client/api';
-import { VersionView } from './version-view';
+import { VersionView, type Version } from './version-view';
 
 /** Every save of a layout, newest first; any of them can be looked at, and made the newest again. */
 export function HistoryScreen({
   layoutId,
   newest,
-  shown,
+  version,
   mayDraw,
 }: {
   layoutId: string;
   /** The version the layout had when this page was made. */
   newest: number;
-  shown: number;
+  version: Version;
   mayDraw: boolean;
 }) {
+  const shown = version.number;
   const router = useRouter();
   const list = useChanges(layoutId);
   const changes = list.pages.flatMap((page) => page.changes);
@@ -96,7 +97,7 @@ export function HistoryScreen({
           <span>Version {shown}</span>
           <span>{shown === latest ? 'the newest' : `read only; the newest is ${latest}`}</span>
         </h2>
-        <VersionView layoutId={layoutId} version={shown} />
+        <VersionView version={version} />
         {restored && (
           <Notice
             className="mt-4"

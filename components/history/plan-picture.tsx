@@ -4,7 +4,15 @@ import { useEffect, useMemo, useRef, useState } from 'react';
 import { PlanShapes } from '@/components/plan/plan-svg';
 import { useTheme } from '@/components/ui/use-theme';
 import { boundsOf, drawSheet, flatProjector } from '@/lib/draw';
-import { planeAt, positionsOf, unitSizeFt, isUnit, type Sheet } from '@/lib/layout';
+import {
+  isUnit,
+  planeAt,
+  positionsOf,
+  unitSizeFt,
+  type Layout,
+  type Sheet,
+  type SiteGround,
+} from '@/lib/layout';
 import { feetToMetres } from '@/lib/geo';
 import type { Limits } from '@/lib/limits';
 
@@ -15,14 +23,17 @@ const LEAST_METRES = 12;
 
 /** A sheet as a still picture, north up, as large as its place allows. Read only. */
 export function PlanPicture({
-  sheet,
+  layout,
+  ground: site,
   limits,
   describedAs,
 }: {
-  sheet: Sheet;
+  layout: Layout;
+  ground: SiteGround;
   limits: Limits;
   describedAs: string;
 }) {
+  const sheet = useMemo(() => ({ layout, site }), [layout, site]);
   const theme = useTheme();
   const { box, width, height } = useSize();
   const ground = useMemo(() => groundOf(sheet), [sheet]);

@@ -7,7 +7,7 @@ import { Problems } from '@/components/ui/problems';
 import { When } from '@/components/ui/when';
 import type { StaleGround } from '@/lib/api';
 import { Problem, saveGround, useGround } from '@/lib/client/api';
-import { AnswersTable } from './answers-table';
+import { AnswersList } from './answers-list';
 import {
   draftComplaint,
   draftLabel,
@@ -17,7 +17,7 @@ import {
   withDraft,
 } from './ground-draft';
 import { GroundFeatures } from './ground-features';
-import { LocatesTable } from './locates-table';
+import { LocatesList } from './locates-list';
 import { OverheadLine } from './overhead-line';
 
 /** What lies under and over the site, with the owners' answers and tickets editable in place. */
@@ -85,9 +85,9 @@ export function GroundSection({ siteId, mayChange }: { siteId: string; mayChange
           {data.saved_by && `, ${data.saved_by.name}`}
         </span>
       </div>
-      <AnswersTable ground={ground} edit={editor} answers={draft.answers} />
+      <AnswersList ground={ground} edit={editor} answers={draft.answers} />
       <OverheadLine ground={ground} edit={editor} />
-      <LocatesTable ground={ground} edit={editor} />
+      <LocatesList ground={ground} edit={editor} />
       {newer && (
         <Notice
           kind="caution"

@@ -4,7 +4,13 @@ import 'leaflet/dist/leaflet.css';
 import '@/components/map-paper/map-paper.css';
 import '@/components/drawing/map/plan-map.css';
 import { useMemo } from 'react';
-import { MapContainer, ScaleControl, TileLayer, ZoomControl } from 'react-leaflet';
+import {
+  AttributionControl,
+  MapContainer,
+  ScaleControl,
+  TileLayer,
+  ZoomControl,
+} from 'react-leaflet';
 import { Graticule } from '@/components/map-paper/graticule';
 import type { SiteAnswer } from '@/lib/api';
 import type { LonLat } from '@/lib/geo';
@@ -33,6 +39,8 @@ export function SitePreview({ site }: { site: SiteAnswer }) {
           ? { bounds, maxBounds: bounds }
           : { center: [origin[1], origin[0]], zoom: ZOOM_WITHOUT_MAP })}
         maxZoom={CLOSEST_ZOOM}
+        zoomSnap={0.25}
+        attributionControl={false}
         scrollWheelZoom={false}
         zoomControl={false}
         className="map-paper plan-map h-80 border border-ink lg:h-[28rem]"
@@ -50,6 +58,7 @@ export function SitePreview({ site }: { site: SiteAnswer }) {
           <Graticule />
         )}
         <GroundOver siteId={site.id} origin={origin} />
+        <AttributionControl prefix={false} position="bottomleft" />
         <ZoomControl position="topright" />
         <ScaleControl metric={false} position="topleft" />
       </MapContainer>

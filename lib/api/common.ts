@@ -6,10 +6,13 @@ export const at = z.iso.datetime();
 export const who = z.object({ id, name: z.string() });
 export type Who = z.infer<typeof who>;
 
+/** Rows of a page where nobody asks for another number. */
+export const PAGE_ROWS = 50;
+
 /** Lists come a page at a time; the cursor of the last page is null. */
 export const page = z.object({
   cursor: z.string().max(500).optional(),
-  limit: z.coerce.number().int().min(1).max(100).default(50),
+  limit: z.coerce.number().int().min(1).max(100).default(PAGE_ROWS),
 });
 
 export const name = z

@@ -3,7 +3,12 @@ import { signedInPage } from '@/app/_shell/signed-in-page';
 import { SignedInSheet } from '@/app/_shell/signed-in-sheet';
 import { SiteScreen } from '@/components/sites/site-screen';
 import { Caution } from '@/components/ui/caution';
+import { Fetched } from '@/components/shell/fetched';
 import { can } from '@/lib/access';
+import { PAGE_ROWS } from '@/lib/api/common';
+import { PATHS } from '@/lib/client/api/paths';
+import { listLayouts } from '@/lib/server/layouts/list-layouts';
+import { readGround } from '@/lib/server/sites/read-ground';
 import { readSite } from '@/lib/server/sites/read-site';
 
 export const metadata: Metadata = { title: 'Site' };
@@ -11,13 +16,22 @@ export const metadata: Metadata = { title: 'Site' };
 export default async function SitePage({ params }: { params: Promise<{ siteId: string }> }) {
   const { siteId } = await params;
   return signedInPage(`/sites/${siteId}`, async (person) => {
-    const site = await readSite(person, siteId);
+    const [site, ground, layouts] = await Promise.all([
+      readSite(person, siteId),
+      readGround(person, siteId),
+      listLayouts(person, siteId, { limit: PAGE_ROWS }),
+    ]);
     return (
       <SignedInSheet person={person} title={site.name} caution={<Caution />}>
-        <SiteScreen
-          site={site}
-          may={{ change: can(person.role, 'site.change'), draw: can(person.role, 'layout.draw') }}
-        />
+        <Fetched
+          answers={{ [PATHS.ground(siteId)]: ground }}
+          firstPages={{ [PATHS.layouts(siteId)]: layouts }}
+        >
+          <SiteScreen
+            site={site}
+            may={{ change: can(person.role, 'site.change'), draw: can(person.role, 'layout.draw') }}
+          />
+        </Fetched>
       </SignedInSheet>
     );
   });

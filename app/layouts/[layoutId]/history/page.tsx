@@ -5,6 +5,7 @@ import { HistoryScreen } from '@/components/history/history-screen';
 import { ButtonLink } from '@/components/ui/button';
 import { Caution } from '@/components/ui/caution';
 import { can } from '@/lib/access';
+import { readChange } from '@/lib/server/layouts/read-change';
 import { readLayout } from '@/lib/server/layouts/read-layout';
 
 export const metadata: Metadata = { title: 'History' };
@@ -19,6 +20,7 @@ export default async function HistoryPage({ params, searchParams }: Props) {
   const { version } = await searchParams;
   return signedInPage(`/layouts/${layoutId}/history`, async (person) => {
     const layout = await readLayout(person, layoutId);
+    const shown = await readChange(person, layoutId, shownVersion(version, layout.version));
     const name = layout.layout.name ?? 'Layout without a name';
     return (
       <SignedInSheet
@@ -43,7 +45,12 @@ export default async function HistoryPage({ params, searchParams }: Props) {
         <HistoryScreen
           layoutId={layoutId}
           newest={layout.version}
-          shown={shownVersion(version, layout.version)}
+          version={{
+            number: shown.version,
+            layout: shown.layout,
+            ground: layout.site.ground,
+            limits: layout.limits,
+          }}
           mayDraw={can(person.role, 'layout.draw')}
         />
       </SignedInSheet>

@@ -7,7 +7,7 @@ import type { Locate, SiteGround } from '@/lib/layout';
 import type { GroundDraft } from './ground-draft';
 
 /** The locate tickets: number, from when work is lawful, until when they are good. */
-export function LocatesTable({
+export function LocatesList({
   ground,
   edit,
 }: {

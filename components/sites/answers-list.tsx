@@ -11,7 +11,7 @@ type Edit = ((part: Partial<GroundDraft>) => void) | null;
 const ANSWERS = ['marked', 'clear', 'waiting'] as const;
 
 /** One line a class: the check's own answer, so that the site and the drawing never disagree. */
-export function AnswersTable({
+export function AnswersList({
   ground,
   edit,
   answers,
@@ -28,40 +28,30 @@ export function AnswersTable({
     asOf: null,
   });
   return (
-    <table className="w-full border-collapse text-left">
-      <caption className="sr-only">Owners’ answers by class of buried line</caption>
-      <thead className="sr-only">
-        <tr>
-          <th scope="col">Class and what is known</th>
-          <th scope="col">Answered</th>
-        </tr>
-      </thead>
-      <tbody>
-        {findings.map((finding) => {
-          const name = finding.subjects[0] as AnswerClass;
-          return (
-            <tr key={name} className="border-b border-rule-faint align-baseline">
-              <th scope="row" className="py-2 pr-4 font-normal">
-                <StatusMark status={finding.status} className="font-semibold">
-                  {finding.message}
-                </StatusMark>
-              </th>
-              <td className="py-2 text-right max-sm:text-left">
-                {edit ? (
-                  <AnswerEntry
-                    name={name}
-                    ground={ground}
-                    put={(answer) => edit({ answers: { ...answers, [name]: answer } })}
-                  />
-                ) : (
-                  <Answered at={ground.answers[name]?.at} />
-                )}
-              </td>
-            </tr>
-          );
-        })}
-      </tbody>
-    </table>
+    <ul aria-label="Owners’ answers by class of buried line">
+      {findings.map((finding) => {
+        const name = finding.subjects[0] as AnswerClass;
+        return (
+          <li
+            key={name}
+            className="flex flex-wrap items-baseline justify-between gap-x-4 gap-y-1 border-b border-rule-faint py-2"
+          >
+            <StatusMark status={finding.status} className="font-semibold">
+              {finding.message}
+            </StatusMark>
+            {edit ? (
+              <AnswerEntry
+                name={name}
+                ground={ground}
+                put={(answer) => edit({ answers: { ...answers, [name]: answer } })}
+              />
+            ) : (
+              <Answered at={ground.answers[name]?.at} />
+            )}
+          </li>
+        );
+      })}
+    </ul>
   );
 }
 
@@ -79,7 +69,7 @@ function AnswerEntry({
 }) {
   const given = ground.answers[name] ?? null;
   return (
-    <span className="flex flex-wrap justify-end gap-2 max-sm:justify-start">
+    <span className="flex flex-wrap gap-2">
       <Select
         aria-label={`${CLASS_WORDS[name]}: owner’s answer`}
         className="max-w-40"

@@ -16,16 +16,25 @@ export function contours(height: Height, extent: Extent, cellFt: number): Contou
   const heights = Array.from({ length: rows + 1 }, (_, j) =>
     Float64Array.from({ length: columns + 1 }, (_, i) => height(at(i, j))),
   );
-  const all = heights.flatMap((row) => [Math.min(...row), Math.max(...row)]);
-  const lines: Contour[] = [];
-  for (let level = Math.ceil(Math.min(...all)); level <= Math.max(...all); level++) {
-    const crossings = new Map<string, Crossing>();
-    for (let j = 0; j < rows; j++) {
-      for (let i = 0; i < columns; i++) crossCell(i, j, level, heights, at, crossings);
+  const levels = new Map<number, Map<string, Crossing>>();
+  for (let j = 0; j < rows; j++) {
+    const [south, north] = [heights[j]!, heights[j + 1]!];
+    for (let i = 0; i < columns; i++) {
+      const [a, b, c, d] = [south[i]!, south[i + 1]!, north[i + 1]!, north[i]!];
+      // Most cells are crossed by no line at all: only those between their heights are looked at.
+      const highest = Math.floor(Math.max(a, b, c, d));
+      for (let level = Math.ceil(Math.min(a, b, c, d)); level <= highest; level++) {
+        let crossings = levels.get(level);
+        if (!crossings) levels.set(level, (crossings = new Map()));
+        crossCell(i, j, level, heights, at, crossings);
+      }
     }
-    for (const path of join(crossings)) lines.push({ height_ft: level, path });
   }
-  return lines;
+  return [...levels]
+    .sort(([a], [b]) => a - b)
+    .flatMap(([level, crossings]) =>
+      join(crossings).map((path): Contour => ({ height_ft: level, path })),
+    );
 }
 
 /** Notes where the level crosses the cell's edges and which crossings belong together. */

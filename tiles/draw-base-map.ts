@@ -115,7 +115,7 @@ async function cut(pixels: Buffer, block: Block): Promise<DrawnTile[]> {
       const one = pixelsOf(pixels, block, column, row);
       if (isClear(one)) return [];
       const bytes = await sharp(one, { raw: { width: TILE_PX, height: TILE_PX, channels: 4 } })
-        .webp({ lossless: true, effort: 1 })
+        .webp({ lossless: true, effort: 0 })
         .toBuffer();
       const hash = createHash('sha256').update(bytes).digest('hex');
       return [{ z: block.zoom, x: block.left + column, y: block.top + row, hash, bytes }];

@@ -1,19 +1,15 @@
-import { distance, METRES_PER_MILE, quantise, type LonLat, type Vec } from '../geo';
+import { quantise } from '../geo';
 import {
+  FARTHEST_MILES,
   isKind,
-  isSiteKind,
+  milesAway,
   pieceSchema,
-  placesOf,
   planeOf,
-  positionsOf,
   type Layout,
   type Piece,
 } from '../layout';
 import { KIND_WORDS, pieceWords } from './piece-words';
 import { EditError } from './types';
-
-/** Farther from the origin a place is a slip, and the exchange file refuses it. */
-const FARTHEST_MILES = 5;
 
 /**
  * The piece as the sheet keeps it: positions quantised, members that were not entered left out.
@@ -42,26 +38,12 @@ export function settledPiece(layout: Layout, piece: Piece): Piece {
 }
 
 function checkWithinReach(layout: Layout, piece: Piece): void {
-  const plane = planeOf(layout);
-  const positions = positionsOf(piece);
-  const away = placesOf(plane, piece)
-    .flat()
-    .map((place, i) =>
-      // Beyond the horizon the plane folds back on itself, and only the way back tells.
-      near(plane.toLonLat(place), positions[i]!) ? distance(place, ORIGIN) : Infinity,
-    );
-  // A line of the site may come from far away; a piece of the layout may not.
-  const reach = isSiteKind(piece.kind) ? Math.min(...away) : Math.max(...away);
-  if (reach <= FARTHEST_MILES * METRES_PER_MILE) return;
+  if (milesAway(planeOf(layout), piece) <= FARTHEST_MILES) return;
   throw new EditError(
     `${pieceWords(piece)} would lie more than ${FARTHEST_MILES} miles from the middle of the drawing.`,
     piece.id,
   );
 }
-
-const ORIGIN: Vec = { x: 0, y: 0 };
-const near = (a: LonLat, b: LonLat): boolean =>
-  Math.abs(a[1] - b[1]) < 1e-6 && Math.abs(((a[0] - b[0] + 540) % 360) - 180) < 1e-6;
 
 const PLACE_KEYS = new Set(['at', 'path', 'paths', 'rings']);
 

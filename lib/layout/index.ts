@@ -2,5 +2,6 @@ export { KIND_WORDS } from './kind-words';
 export * from './pieces';
 export * from './plan';
 export * from './queries';
+export * from './reach';
 export * from './schema';
 export { SYSTEMS, type System } from './values';

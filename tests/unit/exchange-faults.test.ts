@@ -138,6 +138,12 @@ describe('one fault, told with its path', () => {
       /miles from the origin/,
     ],
     [
+      'a sign lost in longitude',
+      (f) => (feature(f, 'Z').geometry!.coordinates = set([98.3, 41.2])),
+      `features[${indexOf('Z')}].geometry.coordinates`,
+      /half a world|miles from the origin/,
+    ],
+    [
       'a system that is none',
       (f) => (feature(f, 'rod-1').properties!.system = set('Q')),
       `features[${indexOf('rod-1')}].properties.system`,

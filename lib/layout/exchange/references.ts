@@ -1,14 +1,8 @@
-import {
-  distance,
-  feetToMetres,
-  footprintToPoint,
-  METRES_PER_MILE,
-  metresToFeet,
-  type LocalPlane,
-} from '../../geo';
+import { distance, feetToMetres, footprintToPoint, metresToFeet, type LocalPlane } from '../../geo';
 import { isSiteKind, type Kind, type Piece, type Run } from '../pieces';
 import { footprintOf, placeOf, placesOf, planeAt } from '../plan';
 import { isRun, isUnit, nameOf } from '../queries';
+import { FARTHEST_MILES, milesAway } from '../reach';
 import { MOST_PIECES } from '../schema';
 import type { LonLat } from '../../geo';
 import type { Fault } from './faults';
@@ -16,7 +10,6 @@ import type { Fault } from './faults';
 /** Faults that only the whole file shows: counts, ids, references, ends, distance. */
 
 const UNITS: readonly Kind[] = ['casualty-vehicle', 'receiving-vehicle', 'pump'];
-const FARTHEST_MILES = 5;
 const END_WITHIN_FT = 1;
 
 /** What each end of a run may be led to. */
@@ -108,16 +101,12 @@ export function placeFaults(placed: readonly Placed[], origin: LonLat): Fault[] 
 }
 
 function farFault(plane: LocalPlane, piece: Piece, index: number): Fault | null {
-  const most = FARTHEST_MILES * METRES_PER_MILE;
-  const miles = placesOf(plane, piece)
-    .flat()
-    .map((place) => distance(place, { x: 0, y: 0 }));
-  // A line of the site may come from far away; a piece of the layout may not.
-  const reach = isSiteKind(piece.kind) ? Math.min(...miles) : Math.max(...miles);
-  if (reach <= most) return null;
+  const miles = milesAway(plane, piece);
+  if (miles <= FARTHEST_MILES) return null;
+  const far = Number.isFinite(miles) ? `${miles.toFixed(1)} miles` : 'half a world';
   return {
     path: `features[${index}].geometry.coordinates`,
-    message: `${nameOf(piece)} lies ${(reach / METRES_PER_MILE).toFixed(1)} miles from the origin; ${FARTHEST_MILES} is the most`,
+    message: `${nameOf(piece)} lies ${far} from the origin; ${FARTHEST_MILES} miles is the most`,
   };
 }
 

@@ -1,6 +1,8 @@
 import { connect, createServer, type Server, type Socket } from 'node:net';
 import { setTimeout as delay } from 'node:timers/promises';
 import { afterAll, beforeAll, expect, test } from 'vitest';
+import type * as HealthRoute from '@/app/api/health/route';
+import type * as SitesRoute from '@/app/api/sites/route';
 import type { ProblemDetails } from '@/lib/api';
 import type { TestPerson } from './support/agency';
 import { call, jsonOf } from './support/call';
@@ -43,8 +45,8 @@ class Line {
 const target = new URL(process.env.DATABASE_URL!);
 const line = new Line(target);
 let planner: TestPerson;
-let sites: typeof import('@/app/api/sites/route');
-let health: typeof import('@/app/api/health/route');
+let sites: typeof SitesRoute;
+let health: typeof HealthRoute;
 
 beforeAll(async () => {
   await line.restore();

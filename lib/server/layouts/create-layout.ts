@@ -6,7 +6,7 @@ import type { CreatedLayout, newLayout } from '@/lib/api';
 import { emptyLayout, type Layout } from '@/lib/layout';
 import { parseExchange } from '@/lib/layout/exchange';
 import { overridesOf, type Limits } from '@/lib/limits';
-import { db, inTransaction } from '../database';
+import { inTransaction, type db } from '../database';
 import { Refusal, refuseFaults } from '../problems';
 import type { SignedIn } from '../session';
 import { findSite } from '../sites/find-site';

@@ -32,10 +32,13 @@ function files(folder: string): string[] {
 export async function routesOnDisk(folders: readonly string[] = FOLDERS): Promise<RouteOnDisk[]> {
   const routes: RouteOnDisk[] = [];
   for (const file of folders.flatMap(files).sort()) {
-    const module = (await import(join(process.cwd(), file))) as Record<string, Handler | undefined>;
+    const exported = (await import(join(process.cwd(), file))) as Record<
+      string,
+      Handler | undefined
+    >;
     const address = `/${file.replace(/^app\//, '').replace(/\/route\.tsx?$/, '')}`;
     for (const method of METHODS) {
-      const handler = module[method];
+      const handler = exported[method];
       if (handler) routes.push({ name: `${method} ${address}`, method, handler });
     }
   }

@@ -4,7 +4,7 @@ import Link from 'next/link';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
 
 const TAB =
-  'inline-flex min-h-11 items-center gap-1.5 whitespace-nowrap border-[1.5px] border-b-0 px-3 leading-none';
+  'inline-flex min-h-11 items-center gap-1.5 whitespace-nowrap border-[1.5px] border-b-0 px-2.5 leading-none';
 
 /** Pages of the sheet that this version lacks, with what stands in for them meanwhile. */
 const NOT_YET = [
@@ -18,7 +18,10 @@ export function IndexTabs() {
   const store = useDrawingStore();
   const layoutId = useDrawing((state) => state.meta.layoutId);
   return (
-    <nav aria-label="Pages of this layout" className="flex items-end gap-1 overflow-x-auto">
+    <nav
+      aria-label="Pages of this layout"
+      className="flex shrink-0 items-end gap-1 max-lg:overflow-x-auto"
+    >
       <span aria-current="page" className={`${TAB} border-2 border-ink bg-paper font-bold`}>
         <Number n={1} /> Drawing
       </span>

@@ -13,24 +13,29 @@ const DrawingMap = dynamic(() => import('../map/drawing-map'), {
   loading: () => <p className="p-6">Unrolling the plan …</p>,
 });
 
-/** The plan in its ruled border, with the feet from the casualty vehicle along it. */
+/**
+ * The plan in its ruled border, with the feet from the casualty vehicle along it. The caution
+ * stands below, where it covers nothing.
+ */
 export function PlanFrame({ children, slim = false }: { children?: ReactNode; slim?: boolean }) {
   const attribution = useDrawing((state) => state.meta.baseMap?.attribution ?? null);
   return (
-    <div className={`h-full min-h-0 ${slim ? 'px-2 pb-1' : 'pl-8 pr-4 pt-6'}`}>
-      <div className="relative h-full border-2 border-ink bg-paper">
+    <div className={`flex h-full min-h-0 flex-col ${slim ? 'px-2' : 'pl-8 pr-4 pt-6'}`}>
+      <div className="relative min-h-0 grow border-2 border-ink bg-paper">
         <div className="absolute inset-0 overflow-hidden">
           <DrawingMap />
         </div>
         {!slim && <Border />}
-        <p className="plan-caution pointer-events-none absolute bottom-1 left-2 right-40 z-[460] font-semibold leading-tight">
+        {children}
+      </div>
+      <div className="flex shrink-0 items-start justify-between gap-3">
+        <p className={`font-semibold leading-tight ${slim ? 'py-1 text-sm' : 'pt-1'}`}>
           {CAUTION_WORDS}
           {attribution && (
-            <span className="block text-sm font-normal text-ink-soft">{attribution}</span>
+            <span className="pl-2 text-sm font-normal text-ink-soft">{attribution}</span>
           )}
         </p>
         <ZoomCells />
-        {children}
       </div>
     </div>
   );

@@ -6,7 +6,7 @@ import { useDecide } from '../saving/keep-saved';
 import type { SaveStatus } from '@/lib/client/saving/save-state';
 
 const QUIET =
-  'min-h-11 max-w-[16rem] cursor-pointer truncate underline decoration-1 underline-offset-4 disabled:cursor-default disabled:no-underline disabled:text-ink-soft';
+  'min-h-11 min-w-0 max-w-[16rem] shrink cursor-pointer truncate underline decoration-1 underline-offset-4 disabled:cursor-default disabled:no-underline disabled:text-ink-soft';
 
 const LOUD: readonly SaveStatus[] = ['offline', 'failed', 'stale', 'signed-out'];
 
@@ -16,18 +16,24 @@ export function SaveLine() {
   const back = useDrawing((state) => undoLabel(state.history));
   const forth = useDrawing((state) => redoLabel(state.history));
   return (
-    <div className="flex min-w-0 items-center gap-3">
+    <div className="flex min-w-0 items-center gap-2.5">
       <button
         type="button"
         className={QUIET}
         disabled={back === null}
         onClick={() => store.getState().undo()}
       >
-        {back === null ? 'Nothing to undo' : `Undo “${back}”`}
+        {back === null ? 'Undo' : `Undo “${back}”`}
       </button>
       {forth !== null && (
-        <button type="button" className={QUIET} onClick={() => store.getState().redo()}>
-          Redo “{forth}”
+        <button
+          type="button"
+          className={QUIET}
+          title={`Redo “${forth}”`}
+          aria-label={`Redo ${forth}`}
+          onClick={() => store.getState().redo()}
+        >
+          Redo
         </button>
       )}
       <SaveWords />
@@ -57,7 +63,7 @@ export function SaveWords() {
       role="status"
       data-save={save.status}
       title={save.words}
-      className={`truncate ${loud ? 'bg-ink px-2 py-0.5 font-semibold text-paper' : 'text-ink-soft'}`}
+      className={`shrink-0 leading-tight ${loud ? 'max-w-[16rem] bg-ink px-2 py-0.5 font-semibold text-paper' : 'text-ink-soft'}`}
     >
       {save.words}
     </p>

@@ -6,7 +6,7 @@ import { SYSTEMS, type System } from '@/lib/layout';
 import type { Fact } from './facts';
 
 const CONTROL =
-  'min-h-8 w-full min-w-0 border border-rule bg-paper px-2 py-0.5 hover:border-ink aria-invalid:border-2 aria-invalid:border-alarm disabled:border-dashed pointer-coarse:min-h-11';
+  'min-h-8 w-full min-w-0 border border-rule bg-paper px-1.5 hover:border-ink aria-invalid:border-2 aria-invalid:border-alarm disabled:border-dashed pointer-coarse:min-h-11';
 
 type Props = {
   fact: Fact;
@@ -74,11 +74,17 @@ function Row({
 }) {
   const id = useId();
   return (
-    <div className="grid grid-cols-[5.5rem_minmax(0,1fr)] items-center gap-x-2">
-      <label htmlFor={id}>{label}</label>
-      <div className="flex min-w-0 items-center gap-1.5">{children(id)}</div>
+    <div className="min-w-0">
+      <label htmlFor={id} className="block text-sm leading-tight">
+        {label}
+      </label>
+      <div className="flex min-w-0 items-center gap-1">{children(id)}</div>
       {error && (
-        <p id={`${id}-error`} role="alert" className="col-start-2 font-semibold text-alarm">
+        <p
+          id={`${id}-error`}
+          role="alert"
+          className="text-sm font-semibold leading-tight text-alarm"
+        >
           {error}
         </p>
       )}
@@ -157,7 +163,7 @@ function Typed({
 
 function placeholderOf(fact: Extract<Fact, { type: 'number' | 'text' }>): string {
   if (fact.type === 'text') return 'none';
-  return fact.standsFor === undefined ? 'not known' : `${fact.standsFor}, not entered`;
+  return fact.standsFor === undefined ? 'not known' : `${fact.standsFor} taken`;
 }
 
 function Systems({ fact, value, disabled, onEnter }: Props) {
@@ -168,10 +174,8 @@ function Systems({ fact, value, disabled, onEnter }: Props) {
     onEnter(next.length === SYSTEMS.length ? null : next);
   };
   return (
-    <fieldset className="grid grid-cols-[5.5rem_minmax(0,1fr)] items-center gap-x-2">
-      <legend className="float-left contents">
-        <span>{fact.label}</span>
-      </legend>
+    <fieldset className="col-span-full">
+      <legend className="text-sm leading-tight">{fact.label}</legend>
       <div className="flex gap-3">
         {SYSTEMS.map((system) => (
           <label

@@ -55,15 +55,17 @@ export function StakeTag({ id, roomy = false }: { id: string; roomy?: boolean })
           {worst.status === 'meets' ? STATUS_WORDS.meets : worst.message}
         </StatusMark>
       )}
-      {factsOf(piece, sheet.layout).map((fact) => (
-        <FactField
-          key={fact.member}
-          fact={fact}
-          value={(piece as Record<string, unknown>)[fact.member]}
-          disabled={!may}
-          onEnter={(value) => change(editFor(piece, fact, value))}
-        />
-      ))}
+      <div className="grid grid-cols-[repeat(auto-fill,minmax(7.25rem,1fr))] gap-x-2.5 gap-y-1">
+        {factsOf(piece, sheet.layout).map((fact) => (
+          <FactField
+            key={fact.member}
+            fact={fact}
+            value={(piece as Record<string, unknown>)[fact.member]}
+            disabled={!may}
+            onEnter={(value) => change(editFor(piece, fact, value))}
+          />
+        ))}
+      </div>
       {may && !isRun(piece) && (
         <StepButtons
           name={name}

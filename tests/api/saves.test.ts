@@ -6,6 +6,10 @@ import { POST as restore } from '@/app/api/layouts/[layoutId]/restore/route';
 import type { ChangesAnswer, LayoutAnswer, ProblemDetails, StaleLayout } from '@/lib/api';
 import { emptyLayout, type Layout } from '@/lib/layout';
 import { db } from '@/lib/server/database';
+import { readChange } from '@/lib/server/layouts/read-change';
+import { readLayout } from '@/lib/server/layouts/read-layout';
+import { readGround } from '@/lib/server/sites/read-ground';
+import { readSite } from '@/lib/server/sites/read-site';
 import { makeAgency, makeLayout, makeSite, type TestAgency } from './support/agency';
 import { call, jsonOf } from './support/call';
 
@@ -203,4 +207,14 @@ describe('history', () => {
     await expect(db.LayoutChange.update({ label: 'x' }, { where })).rejects.toThrow('history');
     await expect(db.LayoutChange.destroy({ where })).rejects.toThrow('history');
   });
+});
+
+test('an id that is no id leads nowhere, however it reaches the query', async () => {
+  const { planner } = agency.people;
+  for (const id of ['北', 'x', '', "' OR 1=1"]) {
+    await expect(readLayout(planner, id)).rejects.toMatchObject({ code: 'not-found' });
+    await expect(readChange(planner, id, 1)).rejects.toMatchObject({ code: 'not-found' });
+    await expect(readSite(planner, id)).rejects.toMatchObject({ code: 'not-found' });
+    await expect(readGround(planner, id)).rejects.toMatchObject({ code: 'not-found' });
+  }
 });

@@ -1,6 +1,7 @@
 import 'server-only';
 import type { FindOptions, InferAttributes } from 'sequelize';
 import { db } from '../database';
+import { knownId } from '../database/known-id';
 import { notFound } from '../problems';
 import type { SignedIn } from '../session';
 
@@ -12,7 +13,7 @@ export async function findLayout(
 ): Promise<db.Layout> {
   const layout = await db.Layout.findOne({
     ...options,
-    where: { id: layoutId, agency_id: person.agencyId },
+    where: { id: knownId(layoutId, 'layout'), agency_id: person.agencyId },
   });
   if (!layout) throw notFound('layout');
   return layout;

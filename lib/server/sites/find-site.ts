@@ -1,6 +1,7 @@
 import 'server-only';
 import type { FindOptions, InferAttributes } from 'sequelize';
 import { db } from '../database';
+import { knownId } from '../database/known-id';
 import { notFound } from '../problems';
 import type { SignedIn } from '../session';
 
@@ -12,7 +13,7 @@ export async function findSite(
 ): Promise<db.Site> {
   const site = await db.Site.findOne({
     ...options,
-    where: { id: siteId, agency_id: person.agencyId },
+    where: { id: knownId(siteId, 'site'), agency_id: person.agencyId },
   });
   if (!site) throw notFound('site');
   return site;

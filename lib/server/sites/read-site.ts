@@ -2,6 +2,7 @@ import 'server-only';
 import type { SiteAnswer } from '@/lib/api';
 import { db } from '../database';
 import type { SignedIn } from '../session';
+import { knownId } from '../database/known-id';
 import { notFound } from '../problems';
 import { baseMapAnswer, LISTED, siteRow, type Listed } from './rows';
 
@@ -9,7 +10,7 @@ type Found = Listed & Pick<db.Site, 'notes' | 'version'> & { baseMap: db.BaseMap
 
 export async function readSite(person: SignedIn, siteId: string): Promise<SiteAnswer> {
   const site = (await db.Site.findOne({
-    where: { id: siteId, agency_id: person.agencyId },
+    where: { id: knownId(siteId, 'site'), agency_id: person.agencyId },
     attributes: [...LISTED, 'notes', 'version'],
     include: { model: db.BaseMap, as: 'baseMap' },
     raw: true,

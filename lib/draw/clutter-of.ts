@@ -13,11 +13,15 @@ export function clutterOf(
   ground: readonly Group[],
 ): Clutter {
   const clutter = new Clutter(frame);
-  for (const { hit, marks } of groups) {
+  for (const { hit, layer, marks } of groups) {
     if (hit?.type === 'spot') clutter.addSpot(hit.at, hit.radiusPx);
     if (hit?.type === 'lines') hit.lines.forEach((path) => clutter.addPath(path));
     if (hit?.type === 'area') hit.rings.forEach((ring) => clutter.addPath(ring));
-    for (const mark of marks) addWords(clutter, mark);
+    for (const mark of marks) {
+      addWords(clutter, mark);
+      // A zone's edge is to stay whole to the eye, teeth and all.
+      if (layer === 'zone' && mark.type === 'path') mark.lines.forEach((l) => clutter.addPath(l));
+    }
   }
   for (const { hit, marks } of ground) {
     if (hit?.type === 'spot') clutter.addSpot(hit.at, hit.radiusPx);

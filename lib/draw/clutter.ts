@@ -32,9 +32,14 @@ export class Clutter {
     this.boxes.push(box);
   }
 
-  addSpot(at: Vec, reach: number): void {
+  /** A square of `size` px round a place. */
+  boxAt(at: Vec, size: number): Box {
     const { x, y } = this.toPx(at);
-    this.addBox({ x: x - reach, y: y - reach, w: reach * 2, h: reach * 2 });
+    return { x: x - size / 2, y: y - size / 2, w: size, h: size };
+  }
+
+  addSpot(at: Vec, reach: number): void {
+    this.addBox(this.boxAt(at, reach * 2));
   }
 
   /** Words turned on the sheet, as a row of small boxes. */

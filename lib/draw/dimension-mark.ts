@@ -34,7 +34,7 @@ function look(frame: Frame, weight: Dimension['weight']): Look {
   return frame.inkOnly ? { ...drawn, size: drawn.size * PAPER_SIZE } : drawn;
 }
 
-const ASIDE_PX = 30;
+const ASIDES = [30, -30, 44, -44, 58, -58, 72, -72];
 const TICK_PX = 6;
 /** Symbols at both ends keep this much of a line that runs from one to the other. */
 const CLEAR_OF_SYMBOL_PX = 11;
@@ -69,8 +69,8 @@ export function dimensionMarks(frame: Frame, dimension: Dimension, clutter: Clut
 }
 
 const RANK_COST = 5;
-/** About half of a symbol, or three lines, under the value. */
-const HIDES_TOO_MUCH = 700;
+/** About a quarter of a symbol, or a line or two, under the value. */
+const HIDES_TOO_MUCH = 420;
 const ALONG = [0.5, 0.4, 0.6, 0.3, 0.7, 0.2, 0.8];
 
 function waysOf({ asidePx }: Dimension, longPx: number, wide: number, high: number): Way[] {
@@ -82,12 +82,7 @@ function waysOf({ asidePx }: Dimension, longPx: number, wide: number, high: numb
       : [{ asidePx: aside, part: 0.5, outPx: Math.sign(aside) * (high / 2 + 5) }];
   if (asidePx !== null) return at(asidePx);
   const inline = between > wide + 20 ? at(0) : [];
-  return [
-    ...inline,
-    ...[ASIDE_PX, -ASIDE_PX, ASIDE_PX + 14, -ASIDE_PX - 14, ASIDE_PX + 28, -ASIDE_PX - 28].flatMap(
-      at,
-    ),
-  ];
+  return [...inline, ...ASIDES.flatMap(at)];
 }
 
 function valuePlace(frame: Frame, ends: Ends, direction: Vec, way: Way): Vec {

@@ -3,7 +3,7 @@ import { line, stroke } from './marks';
 import type { Bounds, DisplayList, LengthUnit, View } from './types';
 
 /** Labels along an edge need about this much room. */
-const TICK_EVERY_PX = 76;
+const TICK_EVERY_PX = 60;
 const GRID_EVERY_PX = 38;
 const MOST_LINES = 400;
 

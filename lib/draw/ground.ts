@@ -25,7 +25,7 @@ export function drawGround(frame: Frame): Group[] {
 function noDrive(frame: Frame, area: PieceOf<'no-drive'>): Group {
   const rings = placesOf(frame.plane, area);
   return areaGroup(area, rings, [
-    line(hatch(frame, rings, 45, 11), stroke('rule', 0.9)),
+    line(hatch(frame, rings, 45, 14), stroke('rule', 0.9)),
     line(rings, stroke('rule', 1.25), true),
   ]);
 }

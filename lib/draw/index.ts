@@ -1,4 +1,5 @@
 export { borderTicks, drawGrid, roundStep, type Tick } from './grid';
+export { legendOf, type LegendEntry } from './legend';
 export { sheetName } from './names';
 export { paint, paintMark, type PaintOptions, type Surface } from './paint';
 export * from './paper';

@@ -9,6 +9,8 @@ import type { Group } from './types';
 import { PUMP_RADIUS_PX } from './units';
 
 const SIZE_PX = 15;
+/** Paper is read nearer than a screen. */
+const PAPER_SIZE_PX = 13;
 
 /** Rods first: theirs is the label a crew looks for. */
 const ORDER: readonly Piece['kind'][] = [
@@ -28,7 +30,12 @@ export function drawLabels(frame: Frame, clutter: Clutter): Group[] {
       const text = seat && isSeen(frame, seat.at) ? sheetName(piece, layout, site) : null;
       if (!seat || !text) return [];
       const rank = ORDER.indexOf(piece.kind);
-      const label = { id: piece.id, text: short(text), size: SIZE_PX, ...seat };
+      const label = {
+        id: piece.id,
+        text: short(text),
+        size: frame.inkOnly ? PAPER_SIZE_PX : SIZE_PX,
+        ...seat,
+      };
       return [{ rank: rank < 0 ? ORDER.length : rank, label }];
     })
     .sort((a, b) => a.rank - b.rank)

@@ -8,6 +8,7 @@ import { readableTurn } from './vectors';
 import { walk, type Footing, type Walk } from './walk';
 
 const SIZE_PX = 14;
+const PAPER_SIZE_PX = 12.5;
 /** One word about every so many px, the first where a short line still carries one. */
 const EVERY_PX = 320;
 const MOST_WORDS = 40;
@@ -23,15 +24,14 @@ export function wordsAlong(
   token: Token,
 ): TextMark[] {
   const way = walk(path);
-  const wide = frame.metres(textWidth(text, SIZE_PX, 600) + 12);
+  const size = frame.inkOnly ? PAPER_SIZE_PX : SIZE_PX;
+  const wide = frame.metres(textWidth(text, size, 600) + 12);
   if (way.metres < wide * 1.4) return [];
   const count = Math.min(MOST_WORDS, Math.max(1, Math.round(way.metres / frame.metres(EVERY_PX))));
   return Array.from({ length: count }, (_, i) =>
     straightPlace(way, ((i + 0.5) * way.metres) / count, wide, way.metres / count / 2),
   ).flatMap((place) =>
-    place
-      ? [words(place.at, text, SIZE_PX, { token, turnDeg: readableTurn(place.direction) })]
-      : [],
+    place ? [words(place.at, text, size, { token, turnDeg: readableTurn(place.direction) })] : [],
   );
 }
 

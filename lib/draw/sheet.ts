@@ -20,7 +20,7 @@ import {
 import { drawRun } from './runs';
 import { LAYERS, type DisplayList, type Group } from './types';
 import { drawUnit } from './units';
-import { drawZone } from './zones';
+import { drawZone, drawZoneWords } from './zones';
 
 export type SheetInput = FrameInput & {
   readonly findings?: readonly Finding[];
@@ -60,6 +60,7 @@ export function drawLayout(input: SheetInput, ground?: DisplayList): DisplayList
     ...pieces,
     ...drawFocus(pieces, selection, hovered),
     ...told,
+    ...drawZoneWords(frame, clutter),
     ...drawLabels(frame, clutter),
   ]);
 }
@@ -83,7 +84,7 @@ function drawPiece(frame: Frame, piece: Piece): Group[] {
       return [drawPool(frame, piece)];
     case 'hot-zone':
     case 'warm-zone':
-      return drawZone(frame, piece);
+      return [drawZone(frame, piece)];
     case 'note':
       return [drawNote(frame, piece)];
     default:

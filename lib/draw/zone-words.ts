@@ -1,6 +1,8 @@
 import { distance, meanOf, type Vec } from '../geo';
+import type { Clutter } from './clutter';
 import type { Frame } from './frame';
 import { crossingsAt } from './hatch';
+import { leastCost } from './least-cost';
 import { words } from './marks';
 import { textWidth } from './text-width';
 import type { Token } from './themes';
@@ -27,46 +29,70 @@ export function circleRadius(ring: readonly Vec[]): number | null {
   return radii.every((r) => Math.abs(r - mean) <= mean * 0.01) ? mean : null;
 }
 
-/** Words that follow the southern inside of a circle, reading from the west. */
+/**
+ * Where round a circle the words may stand: their middle, degrees from south towards east, and
+ * whether their feet point outwards (the southern half) or inwards (the northern).
+ */
+const SOUTH = [0, 25, -25, 50, -50, 70, -70].map((deg) => ({ deg, feetOut: true }));
+const NORTH = [180, 155, 205, 130, 230].map((deg) => ({ deg, feetOut: false }));
+/** South unless another place spares this much: words that wander are hard to find. */
+const RANK_COST = 60;
+
+/** Words that follow the inside of a circle, upright, where they cover least. */
 export function wordsInCircle(
   frame: Frame,
   ring: readonly Vec[],
   radius: number,
   { text, size, insetPx, token }: ZoneWords,
+  clutter: Clutter,
 ): LettersMark | null {
   const middle = meanOf(ring.slice(0, -1));
   const inner = radius - frame.metres(insetPx);
   const spaced = (piece: string): number =>
     frame.metres(textWidth(piece, size, 600) * LETTER_SPACING);
   if (!middle || spaced(text) > Math.PI * 2 * inner * MOST_PART) return null;
-  const letters = [...text].map((letter, i) => {
-    const east = spaced(text.slice(0, i)) + spaced(letter) / 2 - spaced(text) / 2;
-    const turn = east / inner;
-    return {
-      at: { x: middle.x + inner * Math.sin(turn), y: middle.y - inner * Math.cos(turn) },
-      turnDeg: (-turn * 180) / Math.PI,
-    };
+  const { letters } = leastCost([...SOUTH, ...NORTH], RANK_COST, ({ deg, feetOut }) => {
+    const placed = [...text].map((letter, i) => {
+      const along = spaced(text.slice(0, i)) + spaced(letter) / 2 - spaced(text) / 2;
+      const turn = (deg * Math.PI) / 180 + ((feetOut ? 1 : -1) * along) / inner;
+      const at = {
+        x: middle.x + inner * Math.sin(turn),
+        y: middle.y - inner * Math.cos(turn),
+      };
+      const tilt = (-turn * 180) / Math.PI;
+      return { at, turnDeg: feetOut ? tilt : tilt + 180 };
+    });
+    const cost = placed.reduce((sum, { at }) => sum + clutter.cost(clutter.boxAt(at, size)), 0);
+    return { letters: placed, cost };
   });
   return { type: 'letters', text, letters, size, weight: 600, token, halo: 'paper' };
 }
 
-/** Level words as far south in the zone as they fit with a margin; null where they never do. */
+/** Level words in the zone where they fit with a margin, south first; null where they never do. */
 export function wordsInOutline(
   frame: Frame,
   rings: readonly (readonly Vec[])[],
   { text, size, insetPx, token }: ZoneWords,
+  clutter: Clutter,
 ): TextMark | null {
   const north = (rings[0] ?? []).map((v) => v.y);
   const [low, high] = [Math.min(...north), Math.max(...north)];
-  const wide = frame.metres(textWidth(text, size, 600) + insetPx * 2);
+  const width = textWidth(text, size, 600);
+  const wide = frame.metres(width + insetPx * 2);
   const half = frame.metres(size);
-  for (let y = low + frame.metres(insetPx); y < high; y += frame.metres(8)) {
+  const step = Math.max(frame.metres(10), (high - low) / 60);
+  const places: Vec[] = [];
+  for (let y = low + frame.metres(insetPx); y < high; y += step) {
     const room = widestCommon([spans(rings, y - half), spans(rings, y), spans(rings, y + half)]);
-    if (room && room[1] - room[0] >= wide) {
-      return words({ x: (room[0] + room[1]) / 2, y }, text, size, { token });
-    }
+    if (room && room[1] - room[0] >= wide) places.push({ x: (room[0] + room[1]) / 2, y });
   }
-  return null;
+  if (places.length === 0) return null;
+  const { at } = leastCost(places, RANK_COST, (place) => {
+    const { x, y } = clutter.toPx(place);
+    const box = { x: x - width / 2, y: y - size / 2, w: width, h: size };
+    return { at: place, cost: clutter.cost(box) };
+  });
+  return words(at, text, size, { token });
 }
 
 type Span = readonly [number, number];

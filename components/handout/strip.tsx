@@ -1,0 +1,137 @@
+import {
+  standsWords,
+  windFromWords,
+  speedWords,
+  swingWords,
+  downhillWords,
+} from '@/components/conditions/condition-words';
+import { dateTimeWords } from '@/components/conditions/time-words';
+import { countFindings } from '@/components/checks/count-findings';
+import { firstToFailWords } from '@/components/checks/first-to-fail-words';
+import { liquidWords } from '@/components/title-block/liquid-words';
+import { StatusShape } from '@/components/ui/status-mark';
+import { STATUS_WORDS } from '@/components/ui/status';
+import type { Status } from '@/lib/checks';
+import type { LengthUnit, Scale } from '@/lib/draw';
+import type { Blank } from './blanks';
+import { BlankForm, BlankNumber } from './blank-form';
+import type { HandoutInput } from './handout-input';
+import { Legend } from './legend';
+import { STRIP_MM } from './page-geometry';
+import { PaperDial } from './paper-dial';
+import { probeDistances } from './probe-distances';
+import { TitleBlock } from './title-block';
+
+type StripProps = {
+  input: HandoutInput;
+  blanks: readonly Blank[];
+  units: LengthUnit;
+  scale: Scale;
+  zone: string;
+  heightMm: number;
+};
+
+/** Blanks that stand on the first page; the others follow on the next. */
+const FIRST_BLANKS = 2;
+const COUNTED: readonly Status[] = ['not-met', 'not-known', 'caution', 'meets'];
+
+/** The right strip: how far it has come, the wind, the facts, what to fill in, the title block. */
+export function Strip({ input, blanks, units, scale, zone, heightMm }: StripProps) {
+  const counts = countFindings(input.findings);
+  return (
+    <div className="strip" style={{ width: `${STRIP_MM}mm`, height: `${heightMm}mm` }}>
+      <p className="not-approved">NOT APPROVED</p>
+      <ul className="counts">
+        {COUNTED.map((status) => (
+          <li key={status}>
+            <StatusShape status={status} /> <strong>{counts[status]}</strong> {STATUS_WORDS[status]}
+          </li>
+        ))}
+      </ul>
+      <p className="strip-part">
+        <strong>First to fail:</strong> {firstToFailWords(input.firstToFail, input.asOf, zone)}
+      </p>
+      <Weather input={input} zone={zone} />
+      <Facts input={input} units={units} />
+      {blanks.length > 0 && (
+        <section className="strip-part">
+          <h3>
+            {blanks.length} {blanks.length === 1 ? 'blank' : 'blanks'} to fill
+            {blanks.length > FIRST_BLANKS && ', all on the pages behind'}
+          </h3>
+          {blanks.slice(0, FIRST_BLANKS).map(({ number, form }) => (
+            <p key={number} className="strip-blank">
+              <BlankNumber number={number} />
+              <span>
+                <BlankForm form={form} />
+              </span>
+            </p>
+          ))}
+        </section>
+      )}
+      <section className="strip-part rest">
+        <h3>Legend</h3>
+        <Legend sheet={input.sheet} />
+      </section>
+      <TitleBlock input={input} units={units} scale={scale} zone={zone} />
+    </div>
+  );
+}
+
+function Weather({ input, zone }: { input: HandoutInput; zone: string }) {
+  const { conditions } = input.sheet.layout;
+  const { values } = input.limits;
+  const judged = input.findings.some(
+    ({ rule, status }) => rule === 'upwind' && status !== 'not-known' && status !== 'n/a',
+  );
+  const stands = standsWords(input.arc, conditions.wind, {
+    judged,
+    calmBelowMph: values.calm_below_mph,
+  });
+  const wind = [speedWords(conditions.wind, 'mph'), swingWords(conditions.wind)];
+  const seen = conditions.wind?.observed_at;
+  return (
+    <section className="strip-part weather">
+      <PaperDial conditions={conditions} arc={input.arc} />
+      <div>
+        <p>
+          <strong>{windFromWords(conditions.wind) ?? 'Wind not known'}</strong>
+        </p>
+        <p>{wind.filter(Boolean).join(', ') || 'speed and swing not known'}</p>
+        <p>{seen ? `seen ${dateTimeWords(seen, zone)}` : 'time not known'}</p>
+        <p>
+          <strong>{[stands.alarm, stands.words].filter(Boolean).join('. ')}</strong>
+        </p>
+        <p>
+          {unbroken(downhillWords(conditions.slope, '%', values.level_below_pct)) ??
+            'Slope not known'}
+        </p>
+      </div>
+    </section>
+  );
+}
+
+/** A figure stays on the line with its unit. */
+const unbroken = (words: string | null): string | undefined => words?.replace(' %', '\u00a0%');
+
+function Facts({ input, units }: { input: HandoutInput; units: LengthUnit }) {
+  const { layout } = input.sheet;
+  const { acceptance } = input.limits;
+  const { systems, z, y } = probeDistances(layout, units);
+  const facts: readonly (readonly [string, string])[] = [
+    ['Liquid', liquidWords(layout.liquid) ?? 'not known'],
+    ['Accept below', acceptance ? `${acceptance.max_ohm} Ω` : 'not set'],
+    [`Z from ${systems}, ${units}`, z],
+    [`Y from ${systems}, ${units}`, y],
+  ];
+  return (
+    <dl className="strip-part facts">
+      {facts.map(([name, value]) => (
+        <div key={name}>
+          <dt>{name}</dt>
+          <dd>{value}</dd>
+        </div>
+      ))}
+    </dl>
+  );
+}

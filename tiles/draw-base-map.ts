@@ -13,7 +13,7 @@ export const WHOLE_MAP_ZOOM = 21;
 export const CLOSEST_ZOOM = 22;
 
 /** Raised whenever the drawing itself changes, so that browsers fetch the new tiles. */
-const DRAWING_EDITION = 1;
+const DRAWING_EDITION = 2;
 
 /** Tiles a side of one sheet: large enough to be worth a rasteriser's start, small in memory. */
 const SHEET_TILES = 8;

@@ -214,6 +214,6 @@ export const dunmarrowSiding: Scene = {
       on: 'gravel',
       from_zoom: 19,
     },
-    { text: 'Dunmarrow siding', at: by(-300, -200), weight: 'place', from_zoom: 16 },
+    { text: 'Dunmarrow siding', at: by(-300, -200), weight: 'place', from_zoom: 17 },
   ],
 };

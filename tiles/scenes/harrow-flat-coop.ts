@@ -42,9 +42,19 @@ const yard: Ft[] = [
   [216, -126],
   [216, 20],
   [196, 40],
-  [30, 40],
-  [-30, 44],
+  [-46, 40],
   [-46, 34],
+];
+
+/** Room north of the rack for a second truck. */
+const northApron: Ft[] = [
+  [-46, 28],
+  [-46, 88],
+  [-40, 94],
+  [22, 86],
+  [28, 80],
+  [30, 28],
+  [-46, 28],
 ];
 
 const dikeCentre: Ft = [96, 92];
@@ -70,7 +80,7 @@ export const harrowFlatCoop: Scene = {
   roads: [harrowRoad, entrance('west-entrance', -20, 34), entrance('east-entrance', 190, -30)],
   hardstands: [
     { id: 'fuel-yard', outline: yard, surface: 'gravel' },
-    { id: 'north-apron', outline: rectangle([-8, 66], 100, 76, 46), surface: 'gravel' },
+    { id: 'north-apron', outline: northApron, surface: 'gravel' },
     { id: 'rack-slab', outline: rectangle([0, 0], 100, 86, 34), surface: 'concrete' },
     { id: 'dike-floor', outline: rectangle(dikeCentre, 100, 124, 72), surface: 'concrete' },
   ],
@@ -238,7 +248,7 @@ export const harrowFlatCoop: Scene = {
     { text: 'Tank dike', at: [102, 142], toward_deg: 100, weight: 'thing', from_zoom: 19 },
     {
       text: 'Office',
-      at: [148, -90],
+      at: [150, -81],
       toward_deg: 100,
       weight: 'thing',
       on: 'building',
@@ -255,6 +265,6 @@ export const harrowFlatCoop: Scene = {
       on: 'asphalt',
       from_zoom: 18,
     },
-    { text: 'Harrow Flat Co-op', at: [-60, 290], weight: 'place', from_zoom: 16 },
+    { text: 'Harrow Flat Co-op', at: [-60, 290], weight: 'place', from_zoom: 17 },
   ],
 };

@@ -287,6 +287,6 @@ export const sorrelCreekRamp: Scene = {
     { text: 'Turnout', at: [72, 142], weight: 'thing', from_zoom: 20 },
     { text: 'Salt shed', at: [226, 232], weight: 'thing', from_zoom: 19 },
     { text: 'to Sorrel Creek', at: [206, -60], toward_deg: 160, weight: 'water', from_zoom: 19 },
-    { text: 'Sorrel Creek ramp', at: [-190, 300], weight: 'place', from_zoom: 16 },
+    { text: 'Sorrel Creek ramp', at: [-190, 300], weight: 'place', from_zoom: 17 },
   ],
 };

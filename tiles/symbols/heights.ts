@@ -55,9 +55,9 @@ export function contourHeights({ contours, isOpen }: Prepared, pen: Pen): string
             text: String(contour.height_ft),
             at,
             toward_deg,
-            size: 14,
+            size: 17,
             ink: INKS.height,
-            halo: 6,
+            halo: 7,
           }),
         );
     });

@@ -28,7 +28,10 @@ export async function request<Answer>(path: string, sending: Sending = {}): Prom
     throw offline();
   });
   if (!response.ok) throw await problemFrom(response);
-  return (await response.json()) as Answer;
+  // Cut off on its way, or a hotspot's own page in its place: either way the server wasn't reached.
+  return (await response.json().catch(() => {
+    throw offline();
+  })) as Answer;
 }
 
 /** The path with its query; parameters left undefined or empty stay out. */

@@ -18,11 +18,12 @@ import type { System } from './values';
 /**
  * The layout told in ordered sentences, for who does not see the plan or has only a radio:
  * units, where vapour comes from, zones, the systems rod by rod, the test line, what joins what,
- * conditions, and what lies under and over. Distances are from the casualty vehicle's middle.
+ * conditions, and what lies under and over.
  */
 export function describeLayout(sheet: Sheet): string[] {
   const told = new Telling(sheet);
   return [
+    told.reference(),
     ...told.units(),
     ...told.sources(),
     ...told.zones(),
@@ -61,7 +62,13 @@ class Telling {
     this.plane = planeOf(sheet.layout);
     const casualty = unitOf(this.layout, 'C');
     this.from = casualty ? placeOf(this.plane, casualty) : { x: 0, y: 0 };
-    this.fromWords = casualty ? 'from the casualty vehicle' : 'from the sheet’s origin';
+    this.fromWords = casualty
+      ? 'from the middle of the casualty vehicle'
+      : 'from the sheet’s origin';
+  }
+
+  reference(): string {
+    return `Distances and bearings are ${this.fromWords}.`;
   }
 
   units(): string[] {
@@ -109,7 +116,7 @@ class Telling {
     const reach = placesOf(this.plane, zone)[0]!.map((v) => metresToFeet(distance(this.from, v)));
     const [least, most] = [Math.min(...reach), Math.max(...reach)];
     const far = most - least < 1 ? feet(most) : `${least.toFixed(1)} to ${feet(most)}`;
-    return `The edge of the ${words} lies ${far} ${this.fromWords}.`;
+    return `The edge of the ${words} lies ${far} away.`;
   }
 
   systems(): string[] {
@@ -192,7 +199,7 @@ class Telling {
   private place(at: Vec): string {
     const apart = metresToFeet(distance(this.from, at));
     if (apart < 0.05) return `at its middle`;
-    return `${feet(apart)} at ${degrees(this.plane.bearing(this.from, at))} ${this.fromWords}`;
+    return `${feet(apart)} at ${degrees(this.plane.bearing(this.from, at))}`;
   }
 
   private middle(piece: Piece): Vec {

@@ -7,6 +7,7 @@ import { z } from 'zod';
 import { Button } from '@/components/ui/button';
 import { Field, Input } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
+import { useReady } from '@/components/ui/use-ready';
 import { signInWords } from '@/lib/api/sign-in';
 import { requestSignIn } from './auth-requests';
 import { returnPath } from './return-path';
@@ -27,6 +28,7 @@ const UNREACHABLE =
  */
 export function SignInForm({ back, refused }: { back: string | null; refused: string | null }) {
   const [refusal, setRefusal] = useState(refused && signInWords(refused));
+  const ready = useReady();
   const { register, handleSubmit, formState, resetField, setFocus } = useForm({
     resolver: zodResolver(entered),
   });
@@ -84,7 +86,7 @@ export function SignInForm({ back, refused }: { back: string | null; refused: st
           type="submit"
           look="action"
           size="field"
-          disabled={formState.isSubmitting || leaving}
+          disabled={!ready || formState.isSubmitting || leaving}
         >
           {formState.isSubmitting || leaving ? 'Signing in' : 'Sign in'}
         </Button>

@@ -7,8 +7,14 @@ export type PointerType = keyof typeof REACH_PX;
 
 type Found = { readonly id: string; readonly rank: number; readonly metres: number };
 
-/** Small things before what they lie on: else a rod on a vehicle could never be taken. */
-const RANK: Record<Hit['type'], number> = { spot: 0, lines: 1, area: 2 };
+/**
+ * Small things before what they lie on, and what is drawn here before the ground beneath: else a
+ * rod on a vehicle, or a vehicle on a road, could never be taken. Least is taken first.
+ */
+const RANK: Record<'layout' | 'ground', Record<Hit['type'] | 'edge' | 'unit', number>> = {
+  layout: { spot: 0, unit: 1, lines: 2, edge: 4, area: 6 },
+  ground: { spot: 3, unit: 1, lines: 5, edge: 5.5, area: 7 },
+};
 
 /** Ids of the pieces under a place, the one most likely meant first. */
 export function piecesAt(
@@ -35,25 +41,26 @@ const isBetter = (a: Found, b: Found): boolean =>
   a.rank < b.rank || (a.rank === b.rank && a.metres < b.metres);
 
 function hitGroup(
-  { id }: Group,
+  { id, layer }: Group,
   hit: Hit,
   at: Vec,
   metresPerPx: number,
   reachPx: number,
 ): Found | null {
-  const rank = RANK[hit.type];
-  const within = (px: number, metres: number): Found | null =>
+  const ranks = RANK[layer === 'ground' ? 'ground' : 'layout'];
+  const within = (px: number, metres: number, rank: number): Found | null =>
     metres <= Math.max(px, reachPx) * metresPerPx ? { id, rank, metres } : null;
   switch (hit.type) {
     case 'spot':
-      return within(hit.radiusPx, distance(at, hit.at));
+      return within(hit.radiusPx, distance(at, hit.at), ranks.spot);
     case 'lines':
-      return within(hit.nearPx, nearest(at, hit.lines));
+      return within(hit.nearPx, nearest(at, hit.lines), ranks.lines);
     case 'area': {
-      if (!hit.edge && insideArea(at, hit.rings)) return { id, rank, metres: sizeOf(hit.rings) };
-      // The outline ranks with lines: a zone is taken by its edge, and what stands in it by itself.
-      const edge = within(hit.nearPx, nearest(at, hit.rings));
-      return edge && { ...edge, rank: RANK.lines };
+      const isUnit = layer === 'piece';
+      if (!hit.edge && insideArea(at, hit.rings)) {
+        return { id, rank: isUnit ? ranks.unit : ranks.area, metres: sizeOf(hit.rings) };
+      }
+      return within(hit.nearPx, nearest(at, hit.rings), isUnit ? ranks.unit : ranks.edge);
     }
   }
 }

@@ -28,12 +28,22 @@ export function Border() {
         const most = edge === 'top' ? view.size.x : view.size.y;
         if (along < CORNER_PX || along > most - CORNER_PX) return null;
         return edge === 'top' ? (
-          <span key={`t${label}`} className="absolute bottom-full" style={{ left: along }}>
+          <span
+            key={`t${label}`}
+            data-tick="top"
+            className="absolute bottom-full"
+            style={{ left: along }}
+          >
             <span className="absolute bottom-1.5 -translate-x-1/2 whitespace-nowrap">{label}</span>
             <span className="absolute bottom-0 h-1.5 border-l-[1.5px] border-ink" />
           </span>
         ) : (
-          <span key={`l${label}`} className="absolute right-full" style={{ top: along }}>
+          <span
+            key={`l${label}`}
+            data-tick="left"
+            className="absolute right-full"
+            style={{ top: along }}
+          >
             <span className="absolute right-2 -translate-y-1/2 rotate-180 whitespace-nowrap [writing-mode:vertical-rl]">
               {label}
             </span>

@@ -26,17 +26,26 @@ export function PlanFrame({ children, slim = false }: { children?: ReactNode; sl
           <DrawingMap />
         </div>
         {!slim && <Border />}
+        {slim && (
+          <div className="absolute bottom-0 right-0 z-[465] bg-margin">
+            <ZoomCells />
+          </div>
+        )}
         {children}
       </div>
-      <div className="flex shrink-0 items-start justify-between gap-3">
-        <p className={`font-semibold leading-tight ${slim ? 'py-1 text-sm' : 'pt-1'}`}>
-          {CAUTION_WORDS}
-          {attribution && (
-            <span className="pl-2 text-sm font-normal text-ink-soft">{attribution}</span>
-          )}
-        </p>
-        <ZoomCells />
-      </div>
+      {slim ? (
+        <p className="shrink-0 py-1 text-sm font-semibold leading-tight">{CAUTION_WORDS}</p>
+      ) : (
+        <div className="flex shrink-0 items-start justify-between gap-3">
+          <p className="pt-1 font-semibold leading-tight">
+            {CAUTION_WORDS}
+            {attribution && (
+              <span className="pl-2 text-sm font-normal text-ink-soft">{attribution}</span>
+            )}
+          </p>
+          <ZoomCells />
+        </div>
+      )}
     </div>
   );
 }

@@ -22,13 +22,13 @@ const FOOT_PX = 34;
 /** A piece is at least this large to look at, px each way. */
 const HALF_PX = 16;
 
-/** The stake tag beside the selected piece; away while a hand moves something. */
+/** The stake tag beside the selected piece; away while a hand moves or is about to place something. */
 export function FloatingTag() {
   const box = useRef<HTMLDivElement>(null);
   const views = useViewStore();
   const sheet = useDrawing((state) => state.sheet);
   const selection = useDrawing((state) => state.selection);
-  const moving = useDrawing((state) => state.preview !== null);
+  const busy = useDrawing((state) => state.preview !== null || state.inHand !== null);
   const piece = selection === null ? null : findPiece(sheet, selection);
 
   useLayoutEffect(() => {
@@ -61,7 +61,7 @@ export function FloatingTag() {
   return (
     <div
       ref={box}
-      hidden={moving}
+      hidden={busy}
       className="absolute left-0 top-0 z-[470] max-h-[calc(100%-3.5rem)] w-[17.5rem] max-w-[calc(100%-1rem)] overflow-y-auto border-[1.5px] border-ink bg-margin px-3 py-2"
     >
       <StakeTag key={piece.id} id={piece.id} />

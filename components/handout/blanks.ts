@@ -44,20 +44,24 @@ export function blanksOf(sheet: Sheet, findings: readonly Finding[]): Blank[] {
 }
 
 function askedBy(sheet: Sheet, finding: Finding): { key: string; form: string }[] {
+  const [subject = ''] = finding.subjects;
   if (finding.missing.length === 0) {
-    return [{ key: finding.id, form: `${lineWords(sheet, finding)}: _` }];
+    const { message } = finding;
+    // Every check says of a unit that isn't drawn that it isn't: that is one blank.
+    return NOT_DRAWN.test(message)
+      ? [{ key: message, form: `${message}. It stands _ ft from _, bearing _°, heading _°` }]
+      : [{ key: finding.id, form: `${lineWords(sheet, finding)}: _` }];
   }
   return finding.missing.map((what) => {
     const { form, each } = FORMS[what];
     if (!each) return { key: what, form };
-    const subject = finding.subjects[0] ?? '';
-    return what === 'owner-answer'
-      ? {
-          key: `${what} ${subject}`,
-          form: form.replace('_', capital(subject.replaceAll('-', ' '))),
-        }
-      : { key: `${what} ${subject}`, form: `${lineWords(sheet, finding)}. ${form}` };
+    const key = `${what} ${subject}`;
+    if (what === 'owner-answer') {
+      return { key, form: form.replace('_', capital(subject.replaceAll('-', ' '))) };
+    }
+    return { key, form: `${lineWords(sheet, finding)}. ${form}` };
   });
 }
 
+const NOT_DRAWN = /is not drawn$/;
 const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -1,5 +1,10 @@
 /** Something that must not be torn, and how high it stands, mm. */
-export type Block<T> = { readonly heightMm: number; readonly item: T };
+export type Block<T> = {
+  readonly heightMm: number;
+  /** What a page needs above it where it comes first there, such as column heads once more. */
+  readonly leadMm?: number;
+  readonly item: T;
+};
 
 /**
  * Blocks in order on as few pages as hold them. A block marked `withNext` never ends a page: a
@@ -19,7 +24,7 @@ export function paginate<T extends { readonly withNext?: boolean }>(
     if (page.length > 0 && used + needed > pageMm && start) {
       pages.push(page);
       page = [];
-      used = 0;
+      used = blocks[i]!.leadMm ?? 0;
     }
     page.push(item);
     used += heightMm;

@@ -51,12 +51,11 @@ export function tablePages(
     { heightMm: headingMm(table, size.widthMm), item: { table, row: null, withNext: true } },
     ...table.rows.map((row) => ({
       heightMm: rowMm(table, row, size.widthMm),
+      leadMm: TITLE_MM + headMm(table, size.widthMm),
       item: { table, row, withNext: false },
     })),
   ]);
-  // A table that goes on over the page repeats its title and column heads there.
-  const repeated = Math.max(...tables.map((table) => TITLE_MM + headMm(table, size.widthMm)));
-  return paginate(blocks, size.heightMm - repeated).map(partsOf);
+  return paginate(blocks, size.heightMm).map(partsOf);
 }
 
 function partsOf(page: readonly Item[]): TablePart[] {

@@ -32,7 +32,7 @@ type StripProps = {
 };
 
 /** Blanks that stand on the first page; the others follow on the next. */
-const FIRST_BLANKS = 2;
+const FIRST_BLANKS = 1;
 const COUNTED: readonly Status[] = ['not-met', 'not-known', 'caution', 'meets'];
 
 /** The right strip: how far it has come, the wind, the facts, what to fill in, the title block. */
@@ -57,7 +57,7 @@ export function Strip({ input, blanks, units, scale, zone, heightMm }: StripProp
         <section className="strip-part">
           <h3>
             {blanks.length} {blanks.length === 1 ? 'blank' : 'blanks'} to fill
-            {blanks.length > FIRST_BLANKS && ', all on the pages behind'}
+            {blanks.length > FIRST_BLANKS && ', all listed behind'}
           </h3>
           {blanks.slice(0, FIRST_BLANKS).map(({ number, form }) => (
             <p key={number} className="strip-blank">

@@ -4,6 +4,12 @@ import { say } from './say.mjs';
 import { isStopping, onSignal, stopAll } from './stopping.mjs';
 
 /**
+ * After a signal the one thing left is the stopping, which ends the process itself.
+ * @type {Promise<never>}
+ */
+const FOR_EVER = new Promise(() => undefined);
+
+/**
  * @typedef {object} Manner
  * @property {number} interrupted the exit code when a signal ended it
  * @property {(sentence: string) => void} [refused] says why it stopped
@@ -27,10 +33,10 @@ export async function command(work, { interrupted, refused = (sentence) => say(`
     code = await work();
   } catch (fault) {
     // What was interrupted by a signal fails as a matter of course; that has been told already.
-    if (isStopping()) return;
+    if (isStopping()) return FOR_EVER;
     refused(words(fault));
   }
-  if (isStopping()) return;
+  if (isStopping()) return FOR_EVER;
   process.exitCode = await stopped(code);
 }
 

@@ -1,0 +1,5 @@
+import { checks } from './checks';
+import type { Bench } from './result';
+
+/** Every bench by its name, in the order of the report. */
+export const BENCHES: Readonly<Record<string, Bench>> = { checks };

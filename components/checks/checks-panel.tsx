@@ -1,6 +1,6 @@
 'use client';
 
-import { useMemo, useRef, useState } from 'react';
+import { useDeferredValue, useMemo, useRef, useState } from 'react';
 import { CHECKS, type Missing, type Status } from '@/lib/checks';
 import { useDrawing } from '@/lib/client/use-drawing';
 import { ChecksHead } from './checks-head';
@@ -16,7 +16,8 @@ const NOTHING_OFFERED: ReadonlySet<Missing> = new Set();
 
 /** Every check's answer: counts, what fails first, then the findings by question, worst first. */
 export function ChecksPanel() {
-  const findings = useDrawing((s) => s.findings);
+  // The plan comes first: while a piece is dragged the list follows as time is left.
+  const findings = useDeferredValue(useDrawing((s) => s.findings));
   const firstWords = useDrawing((s) => firstToFailWords(s.firstToFail, s.asOf));
   const [show, setShow] = useState<Show>('all');
   const list = useRef<HTMLDivElement>(null);
@@ -40,7 +41,10 @@ export function ChecksPanel() {
       <p className="border-b border-rule pb-1.5 pt-1 leading-snug">
         <strong>First to fail:</strong> {firstWords}
       </p>
-      <div ref={list} className="min-h-0 grow scroll-py-2 overflow-y-auto overscroll-contain pb-3">
+      <div
+        ref={list}
+        className="relative min-h-0 grow scroll-py-2 overflow-y-auto overscroll-contain pb-3"
+      >
         {groups.length === 0 && (
           <p className="py-3">
             {show === 'attention' && findings.length > 0

@@ -1,6 +1,6 @@
 'use client';
 
-import { useId, useState } from 'react';
+import { memo, useId, useState } from 'react';
 import type { Finding, Missing } from '@/lib/checks';
 import { Button } from '@/components/ui/button';
 import { STATUS_INK, STATUS_WORDS } from '@/components/ui/status';
@@ -18,25 +18,20 @@ import { Why } from './why';
  * One finding: status, words, value, gauge; its remedy, or the field for what is not known, under
  * it. The plan shows it while it is pointed at, and pressing it selects what it is about.
  */
-export function FindingRow({
-  finding,
-  title,
-  offered,
-}: {
-  finding: Finding;
-  title: string;
-  /** Of what is missing here, that whose field stands in this line. */
-  offered: ReadonlySet<Missing>;
-}) {
+export const FindingRow = memo(function FindingRow({ finding, title, offered }: RowProps) {
   const store = useDrawingStore();
   const words = useDrawing((s) => lineWords(s.sheet, finding));
   const shown = useDrawing((s) => s.shownFinding === finding.id);
   const [why, setWhy] = useState(false);
   const whyId = useId();
   const attention = needsAttention(finding.status);
+  const canDraw = useDrawing((s) => s.canDraw);
+  /** Something can be done in the line: its remedy, or a field for what is missing. */
+  const acts = canDraw && attention && (finding.remedy !== null || finding.missing.length > 0);
   const ink = STATUS_INK[finding.status];
   const counted = finding.measured?.unit === 'count';
   const allowed = finding.allowed && !counted ? allowedWords(finding.allowed) : null;
+  const whyWords = allowed ? `Why ${allowed}` : 'Why';
 
   const point = (at: boolean): void => store.getState().showFinding(at ? finding.id : null);
   const press = (): void => {
@@ -67,13 +62,16 @@ export function FindingRow({
         <span>
           <span className="sr-only">{STATUS_WORDS[finding.status]}: </span>
           {words}
+          {attention && !acts && (
+            <span className="ml-2 underline underline-offset-4">{whyWords}</span>
+          )}
         </span>
         <strong className={`whitespace-nowrap pl-2 text-lg leading-tight ${ink}`}>
           {lineValue(finding)}
         </strong>
       </button>
       <Gauge finding={finding} />
-      {attention && (
+      {acts && (
         <div className="ml-6 flex flex-wrap items-center gap-x-4 gap-y-1 pb-1">
           <RemedyButton finding={finding} />
           <EnterHere finding={finding} offered={offered} />
@@ -84,12 +82,28 @@ export function FindingRow({
             className="pointer-coarse:min-h-11 min-h-8 cursor-pointer underline underline-offset-4"
             onClick={() => setWhy(!why)}
           >
-            {allowed ? `Why ${allowed}` : 'Why'}
+            {whyWords}
           </button>
         </div>
       )}
       {why ? <Why id={whyId} finding={finding} title={title} /> : <span id={whyId} hidden />}
     </li>
+  );
+}, sameRow);
+
+type RowProps = {
+  finding: Finding;
+  title: string;
+  /** Of what is missing here, that whose field stands in this line. */
+  offered: ReadonlySet<Missing>;
+};
+
+/** Findings are made anew at each run; a line whose answer is the same is not drawn again. */
+function sameRow(a: RowProps, b: RowProps): boolean {
+  return (
+    a.title === b.title &&
+    JSON.stringify(a.finding) === JSON.stringify(b.finding) &&
+    [...a.offered].join() === [...b.offered].join()
   );
 }
 

@@ -70,7 +70,16 @@ export function foldWords(
   }
   if (first.status === 'not-known') {
     const missing = first.missing.map((what) => MISSING_WORDS[what]).join(', ');
-    return missing ? `${title}, ${subjects}: ${missing}` : `${title}, ${subjects}`;
+    if (missing) return `${title}, ${subjects}: ${missing}`;
+    const said = [...new Set(findings.map(({ message }) => lowerFirst(message)))];
+    return said.length <= MOST_SAID
+      ? `${title}: ${said.join(', ')}`
+      : `${title}, ${subjects}: not known`;
   }
   return `${title}, ${subjects}`;
 }
+
+/** More reasons than these are read one by one, by opening the line. */
+const MOST_SAID = 2;
+
+const lowerFirst = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);

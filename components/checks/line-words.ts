@@ -15,17 +15,24 @@ export const subjectNames = (sheet: Sheet, { subjects }: Finding): string[] =>
  */
 export function lineWords(sheet: Sheet, finding: Finding): string {
   const { message } = finding;
-  const said = message.toLowerCase();
-  const unsaid = subjectNames(sheet, finding).filter((name) => !said.includes(name.toLowerCase()));
+  const said = bare(message);
+  const unsaid = subjectNames(sheet, finding).filter((name) => !said.includes(bare(name)));
   const [name] = unsaid;
   if (name === undefined) return message;
   const piece = findPiece(sheet, finding.subjects[0] ?? '');
   const called = piece && nameOf(piece);
-  if (called && said.startsWith(`${called.toLowerCase()} `)) {
+  if (called && message.toLowerCase().startsWith(`${called.toLowerCase()} `)) {
     return capital(name) + message.slice(called.length);
   }
   return `${unsaid.map(capital).join(' to ')}: ${message}`;
 }
+
+/** Letters and figures only: a name is said however it is spaced. */
+const bare = (text: string): string =>
+  ` ${text
+    .toLowerCase()
+    .replace(/[^\p{L}\p{N}]+/gu, ' ')
+    .trim()} `;
 
 const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 

@@ -1,4 +1,5 @@
 import type { Missing } from '@/lib/checks';
+import { needsAttention } from './count-findings';
 import type { Group } from './group-findings';
 
 /** What each line needs of its own: the answer of one class, one ticket, one line's voltage. */
@@ -13,7 +14,7 @@ export function offerFields(groups: readonly Group[]): ReadonlyMap<string, Reado
   const offers = new Map<string, ReadonlySet<Missing>>();
   for (const { rows } of groups) {
     for (const { key, findings } of rows) {
-      if (findings[0].status !== 'not-known') continue;
+      if (!needsAttention(findings[0].status)) continue;
       const here = findings[0].missing.filter((what) => ITS_OWN.has(what) || !taken.has(what));
       here.forEach((what) => taken.add(what));
       offers.set(key, new Set(here));

@@ -79,6 +79,7 @@ export function WindFields() {
       />
       <NumberEntry
         label="Speed"
+        className="col-span-2"
         unit={
           <UnitChoice unit={unit} units={SPEED_UNITS} name="Unit of speed" onChoose={chooseUnit} />
         }

@@ -24,6 +24,7 @@ export function ConditionsWords({ children }: { children?: ReactNode }) {
   const limits = useDrawing((s) => s.limits.values);
   const arc = useDrawing((s) => s.standsFor);
   const judged = useDrawing((s) => s.findings.some(isHeldToTheWind));
+  const canDraw = useDrawing((s) => s.canDraw);
   const [speedUnit] = useSpeedUnit();
   const [steepnessUnit] = useSteepnessUnit();
 
@@ -49,9 +50,15 @@ export function ConditionsWords({ children }: { children?: ReactNode }) {
           <NotEntered>when seen</NotEntered>
         )}
       </div>
-      <StandsLine
-        stands={standsWords(arc, wind, { judged, calmBelowMph: limits.calm_below_mph })}
-      />
+      {wind?.from_deg == null && canDraw ? (
+        <p className="text-sm leading-tight">
+          Press the dial: outer ring for where the wind comes from, inner for downhill.
+        </p>
+      ) : (
+        <StandsLine
+          stands={standsWords(arc, wind, { judged, calmBelowMph: limits.calm_below_mph })}
+        />
+      )}
       <div>
         <p>{downhill ?? <NotEntered>Slope not known</NotEntered>}</p>
         <div className="flex flex-wrap items-baseline justify-between gap-x-3">

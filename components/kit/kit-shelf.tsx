@@ -1,6 +1,8 @@
 'use client';
 
 import { useMemo } from 'react';
+import { useAtRest } from '@/components/pieces/use-at-rest';
+import type { DrawingState } from '@/lib/client/drawing-store';
 import { useDrawing } from '@/lib/client/use-drawing';
 import { groundItems } from './ground-items';
 import { KitChoice } from './kit-choice';
@@ -8,6 +10,9 @@ import { PumpChoice } from './pump-choice';
 import { ShelfButton } from './shelf-button';
 import { alongItems, shelfItems } from './shelf-items';
 import { useRoving } from './use-roving';
+
+const pickLayout = (state: DrawingState) => state.sheet.layout;
+const pickFindings = (state: DrawingState) => state.findings;
 
 /** The kit as it lies in the case, and what comes from no kit, in the bottom margin. */
 export function KitShelf() {
@@ -28,11 +33,12 @@ export function KitShelf() {
   );
 }
 
-const ROW = 'flex items-center gap-x-1 overflow-x-auto overscroll-x-contain [scrollbar-width:thin]';
+const ROW =
+  'relative flex items-center gap-x-1 overflow-x-auto overscroll-x-contain [scrollbar-width:thin] max-sm:flex-wrap';
 
 function FromTheKit() {
-  const layout = useDrawing((s) => s.sheet.layout);
-  const findings = useDrawing((s) => s.findings);
+  const layout = useAtRest(pickLayout);
+  const findings = useAtRest(pickFindings);
   const items = useMemo(() => shelfItems(layout, findings), [layout, findings]);
   const along = useMemo(() => alongItems(layout), [layout]);
   const { tabIndexOf, onFocus, onKeyDown } = useRoving(items.length);
@@ -42,7 +48,7 @@ function FromTheKit() {
       <div
         role="toolbar"
         aria-label="From the kit"
-        className="flex shrink-0 gap-x-1"
+        className="flex shrink-0 gap-x-1 max-sm:shrink max-sm:flex-wrap"
         onKeyDown={onKeyDown}
       >
         {items.map((item, place) => (
@@ -79,7 +85,7 @@ function Left({ left }: { left: number | null }) {
 }
 
 function OnTheGround() {
-  const layout = useDrawing((s) => s.sheet.layout);
+  const layout = useAtRest(pickLayout);
   const canChangeSite = useDrawing((s) => s.canChangeSite);
   const items = useMemo(() => groundItems(layout, canChangeSite), [layout, canChangeSite]);
   const { tabIndexOf, onFocus, onKeyDown } = useRoving(items.length);

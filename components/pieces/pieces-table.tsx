@@ -2,6 +2,7 @@
 
 import { useTable } from '@tanstack/react-table';
 import { Fragment, useMemo, useState } from 'react';
+import type { DrawingState } from '@/lib/client/drawing-store';
 import { useDrawing } from '@/lib/client/use-drawing';
 import { AddPiece } from './add-piece';
 import { ChangePlace } from './change-place';
@@ -9,26 +10,41 @@ import { columns, features } from './piece-columns';
 import { referenceOf } from './piece-place';
 import { pieceRows } from './piece-rows';
 import { TellLayout } from './tell-layout';
+import { useAtRest } from './use-at-rest';
+
+const pickSheet = (state: DrawingState) => state.sheet;
+const pickFindings = (state: DrawingState) => state.findings;
 
 /** Every piece in a table: the plan's twin for the keyboard and for who does not see it. */
 export function PiecesTable() {
-  const sheet = useDrawing((s) => s.sheet);
-  const findings = useDrawing((s) => s.findings);
+  const sheet = useAtRest(pickSheet);
+  const findings = useAtRest(pickFindings);
   const canDraw = useDrawing((s) => s.canDraw);
   const data = useMemo(() => pieceRows(sheet, findings), [sheet, findings]);
   const [changing, setChanging] = useState<string | null>(null);
   const from = referenceOf(sheet.layout).words;
-  const table = useTable({ features, columns, data, getRowId: (row) => row.id });
+  const table = useTable({
+    features,
+    columns,
+    data,
+    getRowId: (row) => row.id,
+    sortDescFirst: false,
+  });
 
   return (
     <section aria-label="Pieces" className="space-y-4">
       {canDraw && <AddPiece />}
-      <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Table of pieces">
+      <p className="text-ink-soft">
+        {data.length} {data.length === 1 ? 'piece' : 'pieces'}. Bearing from true north and distance
+        are taken from the {from} to the middle of the piece.
+      </p>
+      <div
+        className="relative overflow-x-auto"
+        tabIndex={0}
+        role="region"
+        aria-label="Table of pieces"
+      >
         <table className="w-full border-collapse text-left leading-snug">
-          <caption className="pb-1 text-left text-ink-soft">
-            {data.length} {data.length === 1 ? 'piece' : 'pieces'}. Bearing from true north and
-            distance are taken from the {from} to the middle of the piece.
-          </caption>
           <thead>
             {table.getHeaderGroups().map((group) => (
               <tr key={group.id} className="border-b-2 border-ink align-bottom">
@@ -149,7 +165,7 @@ function SelectPiece({ id, name }: { id: string; name: string }) {
     <button
       type="button"
       aria-pressed={selected}
-      className="pointer-coarse:min-h-11 min-h-8 cursor-pointer text-left font-semibold underline decoration-rule underline-offset-4"
+      className="pointer-coarse:min-h-11 inline-block min-h-8 cursor-pointer text-left font-semibold underline decoration-rule underline-offset-4 first-letter:uppercase"
       onClick={() => select(selected ? null : id)}
     >
       {name}

@@ -5,6 +5,7 @@ import type { Finding, Missing } from '@/lib/checks';
 import { SlopeFields, WindFields } from '@/components/conditions/conditions-form';
 import { useDrawing } from '@/lib/client/use-drawing';
 import { whoMay } from '@/lib/access';
+import { needsAttention } from '@/components/checks/count-findings';
 import { KitChoice } from '@/components/kit/kit-choice';
 import { LiquidFields } from '@/components/title-block/liquid-fields';
 import { LocateFields } from './locate-fields';
@@ -40,6 +41,13 @@ const DRAWN: ReadonlySet<Missing> = new Set([
   'rods',
 ]);
 
+/** A single choice leaves room beside it. */
+const WIDTH: Partial<Record<Missing, string>> = {
+  'owner-answer': 'min-w-48 flex-1',
+  kit: 'min-w-48 flex-1',
+  voltage: 'min-w-40 flex-1',
+};
+
 const idOf = (what: Missing): string => `enter-${what}`;
 
 /** Where something is not known, the field for it stands in the line; elsewhere, the way to it. */
@@ -51,10 +59,10 @@ export function EnterHere({
   offered: ReadonlySet<Missing>;
 }) {
   const canDraw = useDrawing((s) => s.canDraw);
-  if (finding.status !== 'not-known' || !canDraw) return null;
+  if (!needsAttention(finding.status) || !canDraw) return null;
   return finding.missing.map((what) =>
     offered.has(what) ? (
-      <div key={what} id={idOf(what)} className="w-full">
+      <div key={what} id={idOf(what)} className={WIDTH[what] ?? (DRAWN.has(what) ? '' : 'w-full')}>
         {fieldFor(what, finding)}
       </div>
     ) : (

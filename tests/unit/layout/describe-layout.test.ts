@@ -12,6 +12,7 @@ describe('the layout in sentences', () => {
   it('says of an empty sheet what is missing, not nothing', () => {
     const told = describeLayout({ layout: emptyLayout([-100, 40]), site: EMPTY_GROUND });
     expect(told).toEqual([
+      'Distances and bearings are from the sheet’s origin.',
       'The casualty vehicle is not drawn.',
       'The receiving vehicle is not drawn.',
       'The pump is not drawn.',
@@ -52,6 +53,6 @@ describe('the layout in sentences', () => {
   it('places every rod by distance and bearing', () => {
     if (!parsed.ok) throw new Error('the fixture is at fault');
     const system = describeLayout(parsed.sheet).find((sentence) => sentence.startsWith('System C'));
-    expect(system).toMatch(/^System C: \S+ \d+\.\d ft at \d{3}° from the casualty vehicle/);
+    expect(system).toMatch(/^System C: \S+ \d+\.\d ft at \d{3}°/);
   });
 });

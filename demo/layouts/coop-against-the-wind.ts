@@ -8,9 +8,9 @@ import { TRUCK_KIT } from '../kits';
  */
 export const coopAgainstTheWind = arrange(harrowFlatCoop.origin, {
   name: 'Loading rack, wind up the slope',
-  planned_at: '2031-05-04T16:00:00Z',
+  planned_at: '2031-05-04T13:00:00Z',
   conditions: {
-    wind: { from_deg: 190, speed_mph: 9, swing_deg: 20, observed_at: '2031-05-04T15:52:00Z' },
+    wind: { from_deg: 190, speed_mph: 9, swing_deg: 20, observed_at: '2031-05-04T12:52:00Z' },
     slope: { down_deg: 205, grade_pct: 4 },
     soil: { resistivity_ohm_m: 85, low_ohm_m: 55, high_ohm_m: 150, source: 'entered' },
   },

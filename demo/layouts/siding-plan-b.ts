@@ -13,9 +13,9 @@ import { TRAILER_KIT } from '../kits';
  */
 export const sidingPlanB = arrange(dunmarrowSiding.origin, {
   name: 'Team track, plan B',
-  planned_at: '2031-05-04T15:30:00Z',
+  planned_at: '2031-05-04T12:30:00Z',
   conditions: {
-    wind: { from_deg: 205, speed_mph: 6, swing_deg: 25, observed_at: '2031-05-04T14:40:00Z' },
+    wind: { from_deg: 205, speed_mph: 6, swing_deg: 25, observed_at: '2031-05-04T11:40:00Z' },
     slope: { down_deg: 20, grade_pct: 2 },
     soil: { resistivity_ohm_m: 140, low_ohm_m: 90, high_ohm_m: 260, source: 'entered' },
   },

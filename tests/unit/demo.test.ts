@@ -3,6 +3,7 @@ import { format, resolveConfig } from 'prettier';
 import { describe, expect, test } from 'vitest';
 import { DEMO_LAYOUTS, DEMO_PEOPLE, DEMO_SITES } from '@/demo/demo';
 import { demoFiles } from '@/demo/demo-files';
+import { asIfAt, DEMO_MOMENT } from '@/demo/shift-times';
 import { runChecks, type Finding, type Status } from '@/lib/checks';
 import { EMPTY_GROUND } from '@/lib/layout';
 import { parseExchange, writeExchange } from '@/lib/layout/exchange';
@@ -130,4 +131,28 @@ test('the slope entered in a layout is the slope of its site’s contours', () =
 test('one person for every role, at addresses that lead nowhere', () => {
   expect(DEMO_PEOPLE.map((person) => person.role).sort()).toEqual([...ROLES].sort());
   expect(DEMO_PEOPLE.every((person) => person.email.endsWith('.example'))).toBe(true);
+});
+
+describe('laid in at another moment', () => {
+  const now = new Date('2027-11-02T08:13:45.678Z');
+
+  test('every layout answers as it did, and its times lie around that minute', () => {
+    for (const { file } of DEMO_LAYOUTS) {
+      const { sheet, limits } = open(file);
+      const then = asIfAt(now, sheet);
+      const statuses = (one: typeof sheet): string[] =>
+        runChecks({ ...one, limits, asOf: one.layout.planned_at }).map((f) => f.id + f.status);
+      expect(statuses(then)).toEqual(statuses(sheet));
+    }
+    const { layout } = asIfAt(now, open(files['Ramp, plan A']!).sheet);
+    expect(layout.planned_at).toBe('2027-11-02T08:13:00Z');
+    expect(layout.conditions.wind?.observed_at).toBe('2027-11-02T08:03:00Z');
+  });
+
+  test('no wind is observed after the moment it is opened', () => {
+    for (const { file } of DEMO_LAYOUTS) {
+      const observed = open(file).sheet.layout.conditions.wind?.observed_at;
+      if (observed) expect(Date.parse(observed)).toBeLessThan(Date.parse(DEMO_MOMENT));
+    }
+  });
 });

@@ -34,7 +34,7 @@ function look(frame: Frame, weight: Dimension['weight']): Look {
   return frame.inkOnly ? { ...drawn, size: drawn.size * PAPER_SIZE } : drawn;
 }
 
-const ASIDES = [30, -30, 44, -44, 58, -58, 72, -72];
+const ASIDES = [30, -30, 44, -44];
 const TICK_PX = 6;
 /** Symbols at both ends keep this much of a line that runs from one to the other. */
 const CLEAR_OF_SYMBOL_PX = 11;

@@ -42,7 +42,7 @@ export const columns = column.columns([
     header: 'Status',
     cell: ({ row }) => (
       <>
-        <StatusMark status={row.original.worst}>
+        <StatusMark status={row.original.worst} className="whitespace-nowrap">
           {row.original.worst === 'n/a' ? 'no check' : undefined}
         </StatusMark>
         {row.original.worstWords && <span className="block">{row.original.worstWords}</span>}

@@ -91,7 +91,10 @@ export function TitleBlock({
         </Cell>
         {metresPerPx !== null && (
           <div className="col-span-2 border-b border-ink px-3 py-1">
-            <ScaleBar metresPerPx={metresPerPx} />
+            <dt className="sr-only">Scale</dt>
+            <dd>
+              <ScaleBar metresPerPx={metresPerPx} />
+            </dd>
           </div>
         )}
       </dl>

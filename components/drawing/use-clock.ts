@@ -14,9 +14,16 @@ export function useClock(): void {
     const onVisible = (): void => {
       if (!document.hidden) tick();
     };
+    // What was just seen must not be judged as if it were still to come.
+    const unsubscribe = store.subscribe((now, before) => {
+      const seen = now.history.present.layout.conditions.wind?.observed_at;
+      if (now.history === before.history || !seen || now.asOf === null) return;
+      if (Date.parse(seen) > Date.parse(now.asOf) && Date.parse(seen) <= Date.now()) tick();
+    });
     const timer = setInterval(tick, TICK_MS);
     document.addEventListener('visibilitychange', onVisible);
     return () => {
+      unsubscribe();
       clearInterval(timer);
       document.removeEventListener('visibilitychange', onVisible);
     };

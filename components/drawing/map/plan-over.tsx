@@ -18,6 +18,7 @@ import { PieceButtons } from './piece-buttons';
 import { PlanStage } from './plan-stage';
 import { PlanWords } from './plan-words';
 import { onlyWords, withoutWords } from './split-list';
+import { usePlanFocus } from './use-plan-focus';
 import { usePlanKeys } from './use-plan-keys';
 import { usePlanPointer } from './use-plan-pointer';
 import { sceneOf, usePlanTool } from './use-plan-tool';
@@ -116,6 +117,7 @@ export function PlanOver({ plane }: { plane: LocalPlane }) {
     },
   });
   usePlanKeys(map, views, plane, tool.send);
+  usePlanFocus(map, views, plane);
 
   if (!view) return null;
   return (

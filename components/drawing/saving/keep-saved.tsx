@@ -8,17 +8,23 @@ import { useSaving } from './use-saving';
 const DraftDialog = dynamic(() => import('./draft-dialog').then((m) => m.DraftDialog));
 const StaleDialog = dynamic(() => import('./stale-dialog').then((m) => m.StaleDialog));
 
-const DecideContext = createContext<() => void>(() => {});
+type Asks = {
+  /** Asks again which of two versions to keep, after "Decide later". */
+  readonly decide: () => void;
+  /** Sends what is not saved; done when the server has answered. */
+  readonly saveNow: () => Promise<void>;
+};
 
-/** Asks again which of two versions to keep, after "Decide later". */
-export const useDecide = (): (() => void) => useContext(DecideContext);
+const AsksContext = createContext<Asks>({ decide: () => {}, saveNow: async () => {} });
+
+export const useKeepSaved = (): Asks => useContext(AsksContext);
 
 /** Keeps the drawing saved, and asks where only a person can say what to keep. */
 export function KeepSaved({ children }: { children: ReactNode }) {
   const saving = useSaving();
   const [putOff, setPutOff] = useState<unknown>(null);
   return (
-    <DecideContext value={() => setPutOff(null)}>
+    <AsksContext value={{ decide: () => setPutOff(null), saveNow: saving.saveNow }}>
       {children}
       {saving.draft && (
         <DraftDialog draft={saving.draft} onTakeUp={saving.takeUp} onLeave={saving.leave} />
@@ -31,6 +37,6 @@ export function KeepSaved({ children }: { children: ReactNode }) {
           onLater={() => setPutOff(saving.stale)}
         />
       )}
-    </DecideContext>
+    </AsksContext>
   );
 }

@@ -18,7 +18,8 @@ export type Saving = {
   readonly stale: Stale | null;
   keepMine(): void;
   takeTheirs(): void;
-  retry(): void;
+  /** Sends what is not saved; done when the server has answered. */
+  saveNow(): Promise<void>;
 };
 
 const later = (work: () => void, ms: number): (() => void) => {
@@ -114,6 +115,6 @@ export function useSaving(): Saving {
     stale,
     keepMine: () => void queue.current?.keepMine(),
     takeTheirs: () => queue.current?.takeTheirs(),
-    retry: () => void queue.current?.retry(),
+    saveNow: async () => queue.current?.retry(),
   };
 }

@@ -36,10 +36,10 @@ export function DeskSheet() {
           </main>
           <aside
             aria-label="Conditions, checks and title"
-            className="flex min-h-0 flex-col border-l-2 border-ink"
+            className="flex min-h-0 flex-col overflow-y-auto border-l-2 border-ink"
           >
             <ConditionsPanel />
-            <div className="flex min-h-0 grow flex-col border-t border-ink">
+            <div className="flex min-h-60 shrink grow basis-60 flex-col border-t border-ink">
               <ChecksPanel />
             </div>
             <ScaledTitleBlock />

@@ -1,7 +1,9 @@
 'use client';
 
 import Link from 'next/link';
+import { useRouter } from 'next/navigation';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
+import { useKeepSaved } from '../saving/keep-saved';
 
 const TAB =
   'inline-flex min-h-11 items-center gap-1.5 whitespace-nowrap border-[1.5px] border-b-0 px-2.5 leading-none';
@@ -16,7 +18,9 @@ const NOT_YET = [
 /** The sheet's pages along its top margin. */
 export function IndexTabs() {
   const store = useDrawingStore();
-  const layoutId = useDrawing((state) => state.meta.layoutId);
+  const router = useRouter();
+  const { saveNow } = useKeepSaved();
+  const handout = `/layouts/${useDrawing((state) => state.meta.layoutId)}/handout`;
   return (
     <nav
       aria-label="Pages of this layout"
@@ -38,7 +42,13 @@ export function IndexTabs() {
         </button>
       ))}
       <Link
-        href={`/layouts/${layoutId}/handout`}
+        href={handout}
+        onClick={(event) => {
+          if (store.getState().save.status === 'saved' || event.ctrlKey || event.metaKey) return;
+          // The handout is made by the server: it must have what is on the drawing first.
+          event.preventDefault();
+          void saveNow().then(() => router.push(handout));
+        }}
         className={`${TAB} border-rule text-ink hover:border-ink hover:underline`}
       >
         <Number n={5} /> Handout

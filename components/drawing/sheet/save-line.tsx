@@ -2,7 +2,7 @@
 
 import { redoLabel, undoLabel } from '@/lib/edits';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
-import { useDecide } from '../saving/keep-saved';
+import { useKeepSaved } from '../saving/keep-saved';
 import type { SaveStatus } from '@/lib/client/saving/save-state';
 
 const QUIET =
@@ -44,7 +44,7 @@ export function SaveLine() {
 /** Where the drawing is kept at this moment; loud where the server does not have it. */
 export function SaveWords() {
   const save = useDrawing((state) => state.save);
-  const decide = useDecide();
+  const { decide } = useKeepSaved();
   const loud = LOUD.includes(save.status);
   if (save.status === 'stale') {
     return (

@@ -1,6 +1,7 @@
 import { readFile } from 'node:fs/promises';
 import type { Transaction } from 'sequelize';
 import { DEMO_LAYOUTS, DEMO_SITES } from '../../demo/demo';
+import { asIfAt } from '../../demo/shift-times';
 import type { Sheet } from '../../lib/layout';
 import { parseExchange } from '../../lib/layout/exchange';
 import { insertLayout } from '../../lib/server/layouts/insert-layout';
@@ -10,20 +11,20 @@ import type { Author } from './agency';
 
 /** The demo's sites with their ground, and the layouts drawn there. */
 export async function seedPlaces(author: Author, transaction: Transaction): Promise<void> {
+  const now = new Date();
   const ids = new Map<string, string>();
   for (const { key, name, place, county, notes, ground, scene } of DEMO_SITES) {
     const entered = { name, where: `${place}, ${county}`, notes, at: scene.origin };
     const siteId = await insertSite(author, entered, transaction);
-    const { site } = await readSheet(ground);
-    const change = { ground: site, label: 'Enter the ground', at: new Date() };
+    const { site } = await readSheet(ground, now);
+    const change = { ground: site, label: 'Enter the ground', at: now };
     await saveGroundIn(author, siteId, 1, change, transaction);
     ids.set(key, siteId);
   }
   // The one to meet first is saved last, because lists begin with what was saved last.
-  const end = Date.now();
   for (const [index, { site, name, file }] of DEMO_LAYOUTS.entries()) {
-    const { layout } = await readSheet(file);
-    const at = new Date(end - index);
+    const { layout } = await readSheet(file, now);
+    const at = new Date(now.getTime() - index);
     const siteId = ids.get(site);
     if (!siteId)
       throw new Error(`${file} belongs to the site ${site}, which the demo doesn't have.`);
@@ -31,9 +32,10 @@ export async function seedPlaces(author: Author, transaction: Transaction): Prom
   }
 }
 
-async function readSheet(file: string): Promise<Sheet> {
+/** The file's sheet as if it had been drawn at `now`: an old wind reading would teach nothing. */
+async function readSheet(file: string, now: Date): Promise<Sheet> {
   const parsed = parseExchange(JSON.parse(await readFile(file, 'utf8')));
-  if (parsed.ok) return parsed.sheet;
+  if (parsed.ok) return asIfAt(now, parsed.sheet);
   const [first] = parsed.faults;
   throw new Error(
     `${file} has ${parsed.faults.length} faults, the first at ${first?.path}: ${first?.message}`,

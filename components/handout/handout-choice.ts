@@ -26,4 +26,4 @@ export function handoutChoice(asked: Asked): HandoutChoice {
   };
 }
 
-const isPaper = (name: string): name is PaperName => name in PAPERS;
+const isPaper = (name: string): name is PaperName => Object.hasOwn(PAPERS, name);

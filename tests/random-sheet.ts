@@ -17,7 +17,7 @@ import {
 } from '@/lib/limits';
 import { seededRandom } from './seeded-random';
 
-export type RandomCase = { sheet: Sheet; limits: Limits; asOf: string };
+export type RandomCase = { sheet: Sheet; limits: Limits; asOf: string | null };
 
 /** Places in feet east and north of the origin, before they are put on the ground. */
 type Feet = readonly [east: number, north: number];

@@ -48,8 +48,13 @@ export function groupFindings(
     );
     return { question, rows: rowsOf(sorted, (rule) => order.get(rule)!.check.title) };
   }).filter(({ rows }) => rows.length > 0);
+  // A question with something wrong or unknown is read first; the sort keeps the rest in order.
+  groups.sort((a, b) => worstOf(a) - worstOf(b));
   return { groups, notApplicable: findings.filter(({ status }) => status === 'n/a') };
 }
+
+/** Rows stand worst first. */
+const worstOf = ({ rows }: Group): number => rankOf(rows[0]!.findings[0].status);
 
 function rowsOf(sorted: readonly Finding[], titleOf: (rule: string) => string): Row[] {
   const runs: [Finding, ...Finding[]][] = [];

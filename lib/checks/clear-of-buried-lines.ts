@@ -6,7 +6,7 @@ import { answer, atLeast, measured } from './support/answer';
 import { betterPlaceRemedy } from './support/better-place';
 import { buriedLines, clearOfLines, doubtFt, linesNear, qualityOf } from './support/ground-lines';
 import { subjectsOf, type DrawnSubject } from './support/subjects';
-import { capital, feet } from './support/words';
+import { capital, feet, feetBeside } from './support/words';
 import type { Check, CheckInput, Finding, Gate, Status } from './types';
 
 const rule = {
@@ -49,7 +49,7 @@ function judge(input: CheckInput, subject: DrawnSubject, line: BuriedLine, clear
     rule,
     [subject.id, line.id],
     status,
-    `${capital(subject.name)} is ${feet(clear)} from ${lineWords(line)}, at least ${feet(least)} with ${feet(doubt)} of doubt`,
+    `${capital(subject.name)} is ${status === 'meets' ? feet(clear) : feetBeside(least, clear)} from ${lineWords(line)}, at least ${feet(least)} with ${feet(doubt)} of doubt`,
     {
       gate,
       measured: measured(clear, 'ft'),

@@ -4,7 +4,7 @@ import { nameOf, piecesOf, placesOf, planeOf, type PieceOf } from '../layout';
 import { answer, atLeast, measured } from './support/answer';
 import { betterPlaceRemedy } from './support/better-place';
 import { shapeAt, subjectsOf, type Subject } from './support/subjects';
-import { capital, feet, NOT_IN_USE } from './support/words';
+import { NOT_IN_USE, capital, feet, feetBeside } from './support/words';
 import type { Check, CheckInput, Finding } from './types';
 
 const rule = { id: 'clear-of-overhead', gate: 'deviation', backing: OVERHEAD_CLEARANCE } as const;
@@ -61,7 +61,7 @@ function judge(input: CheckInput, subject: Subject, line: PieceOf<'overhead-line
     rule,
     about,
     meets ? 'meets' : 'not-met',
-    `${capital(subject.name)} is ${feet(clear)} from ${nameOf(line)}, at least ${feet(least)}`,
+    `${capital(subject.name)} is ${meets ? feet(clear) : feetBeside(least, clear)} from ${nameOf(line)}, at least ${feet(least)}`,
     {
       measured: measured(clear, 'ft'),
       allowed: atLeast(least, 'ft'),

@@ -16,7 +16,10 @@ export type FirstToFail = {
 };
 
 export function firstToFail(input: CheckInput): FirstToFail {
-  const coming = [...windTooOld(input), ...windPast(input), ...ticketsEnd(input)];
+  // What fails already comes before what will.
+  const coming = [...windTooOld(input), ...windPast(input), ...ticketsEnd(input)].sort(
+    (a, b) => Number(a.kind !== 'does-not-stand') - Number(b.kind !== 'does-not-stand'),
+  );
   return {
     words: coming.length > 0 ? coming.map(({ words }) => words).join(', then ') : NOTHING_KNOWN,
     coming,

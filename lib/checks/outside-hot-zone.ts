@@ -4,7 +4,7 @@ import { piecesOf, placesOf, planeOf, type Layout } from '../layout';
 import { answer, atLeast, measured } from './support/answer';
 import { betterPlaceRemedy } from './support/better-place';
 import { shapeAt, subjectsOf, type DrawnSubject } from './support/subjects';
-import { capital, feet, NOT_IN_USE } from './support/words';
+import { NOT_IN_USE, capital, feet, feetBeside } from './support/words';
 import type { Check, CheckInput, Finding } from './types';
 
 const rule = { id: 'outside-hot-zone', gate: 'deviation', backing: COMMON_PRACTICE } as const;
@@ -71,8 +71,8 @@ function judge(
     [subject.id],
     status,
     beyond.inside
-      ? `${name} is inside the hot zone, ${feet(-beyond.feet)} from its edge`
-      : `${name} is ${feet(beyond.feet)} beyond the hot zone, at least ${feet(setback)}`,
+      ? `${name} is inside the hot zone, ${feetBeside(0, -beyond.feet)} from its edge`
+      : `${name} is ${status === 'meets' ? feet(beyond.feet) : feetBeside(setback, beyond.feet)} beyond the hot zone, at least ${feet(setback)}`,
     {
       gate,
       measured: measured(beyond.feet, 'ft'),

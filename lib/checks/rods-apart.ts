@@ -3,7 +3,7 @@ import { DRAWN_WITHIN_FT, LIMIT_TABLE, type Limits } from '../limits';
 import { nameOf, piecesOf, placeOf, planeOf, type Layout, type Rod } from '../layout';
 import { answer, atLeast, between, measured } from './support/answer';
 import { moveRemedy, nearestPlace } from './support/move';
-import { feet } from './support/words';
+import { feet, feetBeside } from './support/words';
 import type { Check, Finding } from './types';
 
 const rule = {
@@ -53,9 +53,9 @@ function judge(layout: Layout, limits: Limits, { a, b, joined }: Pair): Finding 
     [a.id, b.id],
     near || far ? 'not-met' : 'meets',
     near
-      ? `${names} ${feet(apart)}, under the ${feet(least)} limit`
+      ? `${names} ${feetBeside(least, apart)}, under the ${feet(least)} limit`
       : far
-        ? `${names} ${feet(apart)}, over the ${feet(most)} limit`
+        ? `${names} ${feetBeside(most, apart)}, over the ${feet(most)} limit`
         : `${names} ${feet(apart)}`,
     {
       measured: measured(apart, 'ft'),

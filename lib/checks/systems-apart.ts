@@ -12,7 +12,7 @@ import {
 import { quantise } from '../geo';
 import { answer, atLeast, measured } from './support/answer';
 import { nearestPlace } from './support/move';
-import { feet, NOT_IN_USE, systemWords } from './support/words';
+import { NOT_IN_USE, feet, feetBeside, systemWords } from './support/words';
 import type { Check, Remedy } from './types';
 
 const rule = {
@@ -55,7 +55,7 @@ export const systemsApart: Check = {
         rule,
         [one, other],
         meets ? 'meets' : 'not-met',
-        `${one} to ${other} ${feet(apart)}, at least ${feet(least)}`,
+        `${one} to ${other} ${meets ? feet(apart) : feetBeside(least, apart)}, at least ${feet(least)}`,
         {
           measured: measured(apart, 'ft'),
           allowed: atLeast(least, 'ft'),

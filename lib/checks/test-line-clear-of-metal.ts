@@ -6,7 +6,7 @@ import { partWithin } from './support/capsule';
 import { forEachLine, lineNotDrawn } from './support/each-line';
 import { metalLines, type MetalLines } from './support/ground-lines';
 import { missingFrom } from './support/test-line';
-import { feet, systemWords } from './support/words';
+import { feet, feetBeside, systemWords } from './support/words';
 import type { Check } from './types';
 
 const rule = {
@@ -48,7 +48,7 @@ export const testLineClearOfMetal: Check = {
         [line.system],
         clear ? 'meets' : 'caution',
         longest.name
-          ? `${longest.name} runs ${feet(longest.feet)} along the test line of ${systemWords(line.system)}, at most ${feet(most)}${clear ? '' : '; turn the line'}`
+          ? `${longest.name} runs ${clear ? feet(longest.feet) : feetBeside(most, longest.feet)} along the test line of ${systemWords(line.system)}, at most ${feet(most)}${clear ? '' : '; turn the line'}`
           : `No metal runs along the test line of ${systemWords(line.system)}`,
         { measured: measured(longest.feet, 'ft'), allowed: atMost(most, 'ft') },
       );

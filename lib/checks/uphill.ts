@@ -4,7 +4,7 @@ import { answer, atMost, measured } from './support/answer';
 import { betterPlaceRemedy } from './support/better-place';
 import { noSources, sourcesOf, worstAngleTo } from './support/sources';
 import { readSlope, wedge } from './support/wind';
-import { capital, degrees, NOT_IN_USE } from './support/words';
+import { NOT_IN_USE, capital, degrees, degreesBeside } from './support/words';
 import type { Check, Status } from './types';
 import { upwindSubjects } from './upwind';
 
@@ -52,7 +52,7 @@ export const uphill: Check = {
       const angle = angleFrom(subject.at);
       const excused = windGoverns || subject.role === 'probe';
       const status: Status = angle <= most ? 'meets' : excused ? 'caution' : 'not-met';
-      const said = `${capital(subject.name)} stands ${degrees(angle)} off uphill, at most ${degrees(most)}`;
+      const said = `${capital(subject.name)} stands ${status === 'meets' ? degrees(angle) : degreesBeside(most, angle)} off uphill, at most ${degrees(most)}`;
       return answer(
         rule,
         [subject.id],

@@ -5,7 +5,7 @@ import { betterPlaceRemedy } from './support/better-place';
 import { noSources, sourcesOf, worstAngleTo, type Sources } from './support/sources';
 import { subjectsOf, type DrawnSubject } from './support/subjects';
 import { readWind, type WindReading } from './support/wind';
-import { capital, degrees, NOT_IN_USE } from './support/words';
+import { NOT_IN_USE, capital, degrees, degreesBeside } from './support/words';
 import type { Check, CheckInput, Finding, Status } from './types';
 
 const rule = { id: 'upwind', gate: 'deviation', backing: LIMIT_TABLE.upwind_max_deg } as const;
@@ -68,7 +68,7 @@ function judge(input: CheckInput, subject: DrawnSubject, sources: Sources, wind:
     rule,
     [subject.id],
     status,
-    `${capital(subject.name)} stands ${degrees(angle)} off the wind, at most ${degrees(allowed)} with its swing of ${degrees(wind.swingDeg)}`,
+    `${capital(subject.name)} stands ${status === 'meets' ? degrees(angle) : degreesBeside(allowed, angle)} off the wind, at most ${degrees(allowed)} with its swing of ${degrees(wind.swingDeg)}`,
     {
       measured: measured(angle, 'deg'),
       allowed: atMost(allowed, 'deg'),

@@ -2,7 +2,7 @@ import { threeDigits } from '../geo';
 import { LIMIT_TABLE } from '../limits';
 import { answer, atLeast, measured } from './support/answer';
 import { isCalm, readSlope, readWind, wedge } from './support/wind';
-import { degrees } from './support/words';
+import { degrees, degreesBeside } from './support/words';
 import type { Check } from './types';
 
 const rule = {
@@ -41,7 +41,7 @@ export const windAndSlopeAgree: Check = {
         meets ? 'meets' : 'caution',
         meets
           ? `Ground both upwind and uphill spans ${degrees(width)}`
-          : `Uphill is downwind: ground both upwind and uphill spans only ${degrees(width)}; ${crosswindChoice(wind.fromDeg, slope.kind === 'sloping' ? slope.uphillDeg : 0)}`,
+          : `Uphill is downwind: ground both upwind and uphill spans only ${degreesBeside(least, width)}; ${crosswindChoice(wind.fromDeg, slope.kind === 'sloping' ? slope.uphillDeg : 0)}`,
         { measured: measured(width, 'deg'), allowed: atLeast(least, 'deg') },
       ),
     ];

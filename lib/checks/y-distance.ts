@@ -4,7 +4,7 @@ import type { Layout } from '../layout';
 import { answer, between, measured } from './support/answer';
 import { forEachLine, lineNotDrawn } from './support/each-line';
 import { missingFrom, type TestLine } from './support/test-line';
-import { feet, systemWords } from './support/words';
+import { feet, feetBeside, systemWords } from './support/words';
 import { moveY } from './support/y-place';
 import type { Check, Finding } from './types';
 import { bandStatus, ratioMeets } from './z-distance';
@@ -28,7 +28,7 @@ function judge(layout: Layout, limits: Limits, line: TestLine): Finding {
     rule,
     [line.system],
     status,
-    `Y is ${feet(far)} from ${systemWords(line.system)}, ${feet(least)} to ${feet(most)}${parting(line, most)}`,
+    `Y is ${status === 'meets' ? feet(far) : feetBeside(far < least ? least : most, far)} from ${systemWords(line.system)}, ${feet(least)} to ${feet(most)}${parting(line, most)}`,
     {
       measured: measured(far, 'ft'),
       allowed: between(least, most, 'ft'),

@@ -4,7 +4,7 @@ import type { Layout } from '../layout';
 import { answer, atMost, measured } from './support/answer';
 import { forEachLine, lineNotDrawn } from './support/each-line';
 import { missingFrom, type TestLine } from './support/test-line';
-import { feet, systemWords } from './support/words';
+import { feet, feetBeside, systemWords } from './support/words';
 import { moveY } from './support/y-place';
 import type { Check, Finding, Status } from './types';
 
@@ -37,7 +37,7 @@ function judge(layout: Layout, limits: Limits, line: TestLine): Finding {
     [line.system],
     status,
     between
-      ? `Y is ${feet(offsetFt)} off the line from ${systemWords(line.system)} to Z, at most ${feet(most)}`
+      ? `Y is ${status === 'meets' ? feet(offsetFt) : feetBeside(most, offsetFt)} off the line from ${systemWords(line.system)} to Z, at most ${feet(most)}`
       : `Y is not between ${systemWords(line.system)} and Z`,
     {
       measured: measured(offsetFt, 'ft'),

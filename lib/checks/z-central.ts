@@ -3,7 +3,7 @@ import { DRAWN_WITHIN_FT, LIMIT_TABLE } from '../limits';
 import { systemsInUse } from '../layout';
 import { answer, atMost, measured } from './support/answer';
 import { testLineOf } from './support/test-line';
-import { feet } from './support/words';
+import { feet, feetBeside } from './support/words';
 import type { Check } from './types';
 
 const rule = { id: 'z-central', gate: 'ack', backing: LIMIT_TABLE.z_spread_max_ft } as const;
@@ -24,12 +24,13 @@ export const zCentral: Check = {
     }
     const spread = Math.max(...reaches) - Math.min(...reaches);
     const most = limits.values.z_spread_max_ft;
+    const meets = spread <= most + DRAWN_WITHIN_FT.value;
     return [
       answer(
         rule,
         [],
-        spread <= most + DRAWN_WITHIN_FT.value ? 'meets' : 'caution',
-        `Z is ${feet(spread)} farther from one system than from another, at most ${feet(most)}`,
+        meets ? 'meets' : 'caution',
+        `Z is ${meets ? feet(spread) : feetBeside(most, spread)} farther from one system than from another, at most ${feet(most)}`,
         { measured: measured(spread, 'ft'), allowed: atMost(most, 'ft') },
       ),
     ];

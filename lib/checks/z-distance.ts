@@ -5,7 +5,7 @@ import { answer, between, measured } from './support/answer';
 import { moveRemedy, nearestPlace } from './support/move';
 import { forEachLine, lineNotDrawn } from './support/each-line';
 import { missingFrom, yRatio, type TestLine } from './support/test-line';
-import { feet, systemWords } from './support/words';
+import { feet, feetBeside, systemWords } from './support/words';
 import type { Check, Finding, Remedy, Status } from './types';
 
 const rule = { id: 'z-distance', gate: 'deviation', backing: LIMIT_TABLE.z_min_ft } as const;
@@ -28,7 +28,7 @@ function judge(layout: Layout, limits: Limits, line: TestLine): Finding {
     rule,
     [line.system],
     status,
-    `Z is ${feet(far)} from ${systemWords(line.system)}, ${feet(least)} to ${feet(most)}${
+    `Z is ${status === 'meets' ? feet(far) : feetBeside(far < least ? least : most, far)} from ${systemWords(line.system)}, ${feet(least)} to ${feet(most)}${
       status === 'caution' ? '; longer than usual, but Y keeps its share' : ''
     }`,
     {

@@ -4,7 +4,7 @@ import type { CheckInput, Finding, Missing } from '../types';
 import { answer, atLeast, measured, type Rule } from './answer';
 import { betterPlaceRemedy } from './better-place';
 import { shapeAt, subjectsOf } from './subjects';
-import { capital, feet, NOT_IN_USE } from './words';
+import { NOT_IN_USE, capital, feet, feetBeside } from './words';
 
 type Clearance = {
   readonly rule: Rule;
@@ -41,7 +41,7 @@ export function keptClear(clearance: Clearance): Finding[] {
       rule,
       [subject.id],
       meets ? 'meets' : 'not-met',
-      `${capital(subject.name)} is ${feet(clear)} from ${what}, at least ${feet(leastFt)}`,
+      `${capital(subject.name)} is ${meets ? feet(clear) : feetBeside(leastFt, clear)} from ${what}, at least ${feet(leastFt)}`,
       {
         measured: measured(clear, 'ft'),
         allowed: atLeast(leastFt, 'ft'),

@@ -39,7 +39,7 @@ const sheet: Sheet = {
 };
 
 describe('grouping of findings', () => {
-  it('puts the worst first inside a question and keeps the questions in order', () => {
+  it('puts the worst question first, and the worst first inside it', () => {
     const { groups } = groupFindings(
       [
         ...many('upwind', 'meets', 1),
@@ -52,10 +52,10 @@ describe('grouping of findings', () => {
       'all',
     );
     expect(groups.map((group) => group.question)).toEqual([
-      'Are they apart?',
       'Is everything in the right place?',
+      'Are they apart?',
     ]);
-    expect(groups[1]!.rows.map((row) => row.findings[0].status)).toEqual([
+    expect(groups[0]!.rows.map((row) => row.findings[0].status)).toEqual([
       'not-met',
       'not-known',
       'caution',

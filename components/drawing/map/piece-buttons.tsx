@@ -84,6 +84,7 @@ const PieceButton = memo(
       <button
         type="button"
         data-piece={piece.id}
+        data-kind={piece.kind}
         data-under={JSON.stringify({ type: 'piece', id: piece.id } satisfies Under)}
         aria-label={name}
         aria-pressed={selected}

@@ -1,4 +1,5 @@
 import type { Locator, Page } from 'playwright-core';
+import { SITE_KINDS } from '@/lib/layout';
 
 /** What a person does on the drawing, by what is seen of it: ticks, names, buttons. */
 
@@ -84,10 +85,16 @@ export async function setFact(page: Page, label: string, value: string): Promise
   await field.press('Enter');
 }
 
+/** The layout's pieces by name and status; of the site's, only those in view have buttons. */
 export const pieceNames = (page: Page): Promise<string[]> =>
-  page
-    .locator('button[data-piece]')
-    .evaluateAll((buttons) => buttons.map((b) => b.getAttribute('aria-label') ?? '').sort());
+  page.locator('button[data-piece]').evaluateAll(
+    (buttons, siteKinds) =>
+      buttons
+        .filter((b) => !siteKinds.includes(b.getAttribute('data-kind') ?? ''))
+        .map((b) => b.getAttribute('aria-label') ?? '')
+        .sort(),
+    [...SITE_KINDS],
+  );
 
 /** Waits until the margin says that the server has everything. */
 export async function saved(page: Page): Promise<void> {

@@ -1,3 +1,4 @@
+import { readFile } from 'node:fs/promises';
 import AxeBuilder from '@axe-core/playwright';
 import type { Page } from 'playwright-core';
 import { describe, expect, test } from 'vitest';
@@ -8,16 +9,39 @@ withChromium();
 /** Refused requests are what these tests ask for; the browser mentions each. */
 const REFUSALS = /Failed to load resource: the server responded with a status of 4\d\d/;
 
-async function firstSite(page: Page): Promise<string> {
+async function demoSite(page: Page): Promise<string> {
   await page.goto('/sites');
-  const href = await page.getByRole('rowheader').getByRole('link').first().getAttribute('href');
+  const href = await page.getByRole('link', { name: 'Dunmarrow siding' }).getAttribute('href');
   return href ?? '';
 }
 
-async function firstHistory(page: Page): Promise<string> {
-  await page.goto(await firstSite(page));
+async function demoHistory(page: Page): Promise<string> {
+  await page.goto(await demoSite(page));
   const link = page.getByRole('link', { name: /^History of/ }).first();
   return (await link.getAttribute('href')) ?? '';
+}
+
+const post = (page: Page, path: string, body: object) =>
+  page.evaluate(
+    async ([to, sent]) => {
+      const headers = { 'content-type': 'application/json' };
+      const answer = await fetch(to, { method: 'POST', headers, body: sent });
+      if (!answer.ok) throw new Error(`${to} answered ${answer.status}`);
+      return ((await answer.json()) as { id: string }).id;
+    },
+    [path, JSON.stringify(body)] as const,
+  );
+
+/** A site of the test's own, so that the demo stays as the other tests expect it. */
+async function ownSite(page: Page, name: string): Promise<string> {
+  return `/sites/${await post(page, '/api/sites', { name, at: [-100.9, 42.2] })}`;
+}
+
+/** A finished layout on a site of the test's own. */
+async function ownLayout(page: Page, name: string): Promise<string> {
+  const file = await readFile('tests/fixtures/exchange/everything-met.geojson', 'utf8');
+  const site = await ownSite(page, name);
+  return post(page, `/api${site}/layouts`, { name, from: { file: JSON.parse(file) } });
 }
 
 /** Every page of this file, and how to come to it. */
@@ -28,10 +52,10 @@ const PAGES: Record<string, { signedIn: boolean; path: (page: Page) => Promise<s
     'blank readings page': { signedIn: false, path: () => '/blank-readings' },
     'nothing there': { signedIn: false, path: () => '/no-such-page' },
     sites: { signedIn: true, path: () => '/sites' },
-    'a site': { signedIn: true, path: firstSite },
+    'a site': { signedIn: true, path: demoSite },
     kits: { signedIn: true, path: () => '/kits' },
     limits: { signedIn: true, path: () => '/limits' },
-    'a history': { signedIn: true, path: firstHistory },
+    'a history': { signedIn: true, path: demoHistory },
   };
 
 const sideways = (page: Page) =>
@@ -166,10 +190,9 @@ describe('sites', () => {
     const page = await openPageAs('planner');
     await page.goto('/sites');
     const rows = page.getByRole('rowheader').getByRole('link');
-    expect(await rows.count()).toBe(3);
-    const name = (await rows.first().innerText()).trim();
-    await page.getByRole('searchbox').fill(name.slice(1, 6).toUpperCase());
-    await expect.poll(() => rows.allInnerTexts()).toEqual([name]);
+    expect(await rows.count()).toBeGreaterThanOrEqual(3);
+    await page.getByRole('searchbox').fill('SORREL c');
+    await expect.poll(() => rows.allInnerTexts()).toEqual(['Sorrel Creek ramp']);
     await page.getByRole('searchbox').fill('100%_nothing');
     await page.getByText('No site has “100%_nothing”', { exact: false }).waitFor();
   });
@@ -186,7 +209,7 @@ describe('sites', () => {
     const page = await openPageAs('planner');
     await page.goto('/sites');
     await page.getByRole('button', { name: 'New site' }).click();
-    await page.getByLabel('Name').fill('Kettle Road tank farm');
+    await page.getByLabel('Name', { exact: true }).fill('Kettle Road tank farm');
     await page.getByLabel('Position').fill('somewhere');
     await page.getByRole('button', { name: 'Enter the site' }).click();
     await page.getByText('Write latitude, then longitude', { exact: false }).waitFor();
@@ -201,7 +224,7 @@ describe('sites', () => {
     const page = await openPageAs('crew');
     await page.goto('/sites');
     await expect.poll(() => page.getByRole('button', { name: 'New site' }).count()).toBe(0);
-    await page.goto(await firstSite(page));
+    await page.goto(await demoSite(page));
     await page.getByRole('heading', { name: 'What is under and over this ground' }).waitFor();
     expect(await page.getByRole('button', { name: /Change answers/ }).count()).toBe(0);
     expect(await page.getByRole('heading', { name: 'Start a layout' }).count()).toBe(0);
@@ -224,7 +247,7 @@ describe('a site’s ground', () => {
 
   test('an answer is entered, saved and there again after a reload', async () => {
     const page = await openPageAs('planner');
-    await page.goto(await firstSite(page));
+    await page.goto(await ownSite(page, 'Answers for a test'));
     await page.getByRole('button', { name: 'Change answers and tickets' }).click();
     await page.getByLabel('Sewer: owner’s answer').selectOption('waiting');
     await page.getByRole('button', { name: 'Add a ticket' }).click();
@@ -241,7 +264,7 @@ describe('a site’s ground', () => {
       await openPageAs('planner', { expectedComplaints: REFUSALS }),
       await openPageAs('safety-officer', { expectedComplaints: REFUSALS }),
     ];
-    const site = await firstSite(one);
+    const site = await ownSite(one, 'Two at once');
     for (const page of [one, other]) {
       await page.goto(site);
       await page.getByRole('button', { name: 'Change answers and tickets' }).click();
@@ -264,9 +287,9 @@ describe('a site’s ground', () => {
 
 describe('starting a layout', () => {
   const start = async (page: Page, file: { name: string; content: string }) => {
-    await page.goto(await firstSite(page));
+    await page.goto(await ownSite(page, file.name));
     await page.getByLabel('from an exchange file').check();
-    await page.getByLabel('Exchange file').setInputFiles({
+    await page.getByLabel('Exchange file', { exact: true }).setInputFiles({
       name: file.name,
       mimeType: 'application/geo+json',
       buffer: Buffer.from(file.content),
@@ -313,9 +336,11 @@ describe('starting a layout', () => {
 
   test('a copy of a layout opens as its own drawing', async () => {
     const page = await openPageAs('planner');
-    await page.goto(await firstSite(page));
+    await ownLayout(page, 'To be copied');
+    await page.goto('/sites');
+    await page.getByRole('link', { name: 'To be copied' }).first().click();
     await page.getByLabel('from a layout of this site').check();
-    await page.getByLabel('Name').fill('Copy for a test');
+    await page.getByLabel('Name', { exact: true }).fill('Copy for a test');
     await page.getByRole('button', { name: 'Start the layout' }).click();
     await page.waitForURL(/\/layouts\/[0-9a-f-]{36}$/);
   });
@@ -324,8 +349,8 @@ describe('starting a layout', () => {
 describe('history', () => {
   test('an older version is looked at and restored, and nothing is lost', async () => {
     const page = await openPageAs('planner');
-    const path = await firstHistory(page);
-    const layoutId = path.split('/')[2];
+    const layoutId = await ownLayout(page, 'Looked back at');
+    const path = `/layouts/${layoutId}/history`;
     // A second version, saved as the drawing saves.
     const status = await page.evaluate(async (id) => {
       const address = `/api/layouts/${id}`;
@@ -342,12 +367,13 @@ describe('history', () => {
     await page.goto(path);
     await page.getByText('Nothing is drawn in this version.').waitFor();
     const versions = page.getByRole('region', { name: 'Versions' }).getByRole('listitem');
-    const before = await versions.count();
+    await versions.last().waitFor();
+    expect(await versions.count()).toBe(2);
     await versions.last().getByRole('link').click();
     await page.getByRole('img', { name: /Plan of version 1/ }).waitFor();
     await page.getByRole('button', { name: 'Make version 1 the newest' }).click();
     await page.getByText('now holds what version 1 held', { exact: false }).waitFor();
-    await expect.poll(() => versions.count()).toBe(before + 1);
+    await expect.poll(() => versions.count()).toBe(3);
     await page.getByText('Take everything off').waitFor();
     await page.goto(path);
     await page.getByRole('img', { name: /Plan of version/ }).waitFor();
@@ -355,7 +381,7 @@ describe('history', () => {
 
   test('a crew member may look but not restore', async () => {
     const page = await openPageAs('crew');
-    await page.goto(`${await firstHistory(page)}?version=1`);
+    await page.goto(`${await demoHistory(page)}?version=1`);
     await page.getByRole('heading', { name: /Version 1/ }).waitFor();
     expect(await page.getByRole('button', { name: /the newest/ }).count()).toBe(0);
   });

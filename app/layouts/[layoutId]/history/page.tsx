@@ -2,9 +2,13 @@ import type { Metadata } from 'next';
 import { signedInPage } from '@/app/_shell/signed-in-page';
 import { SignedInSheet } from '@/app/_shell/signed-in-sheet';
 import { HistoryScreen } from '@/components/history/history-screen';
+import { Fetched } from '@/components/shell/fetched';
 import { ButtonLink } from '@/components/ui/button';
 import { Caution } from '@/components/ui/caution';
 import { can } from '@/lib/access';
+import { PAGE_ROWS } from '@/lib/api/common';
+import { PATHS } from '@/lib/client/api/paths';
+import { listChanges } from '@/lib/server/layouts/list-changes';
 import { readChange } from '@/lib/server/layouts/read-change';
 import { readLayout } from '@/lib/server/layouts/read-layout';
 
@@ -20,7 +24,10 @@ export default async function HistoryPage({ params, searchParams }: Props) {
   const { version } = await searchParams;
   return signedInPage(`/layouts/${layoutId}/history`, async (person) => {
     const layout = await readLayout(person, layoutId);
-    const shown = await readChange(person, layoutId, shownVersion(version, layout.version));
+    const [shown, changes] = await Promise.all([
+      readChange(person, layoutId, shownVersion(version, layout.version)),
+      listChanges(person, layoutId, { limit: PAGE_ROWS }),
+    ]);
     const name = layout.layout.name ?? 'Layout without a name';
     return (
       <SignedInSheet
@@ -42,17 +49,19 @@ export default async function HistoryPage({ params, searchParams }: Props) {
             </ButtonLink>
           </span>
         </div>
-        <HistoryScreen
-          layoutId={layoutId}
-          newest={layout.version}
-          version={{
-            number: shown.version,
-            layout: shown.layout,
-            ground: layout.site.ground,
-            limits: layout.limits,
-          }}
-          mayDraw={can(person.role, 'layout.draw')}
-        />
+        <Fetched firstPages={{ [PATHS.changes(layoutId)]: changes }}>
+          <HistoryScreen
+            layoutId={layoutId}
+            newest={layout.version}
+            version={{
+              number: shown.version,
+              layout: shown.layout,
+              ground: layout.site.ground,
+              limits: layout.limits,
+            }}
+            mayDraw={can(person.role, 'layout.draw')}
+          />
+        </Fetched>
       </SignedInSheet>
     );
   });

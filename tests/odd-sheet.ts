@@ -214,3 +214,7 @@ export function oddCase(seed: number): RandomCase {
   }
   return one as RandomCase;
 }
+
+/** Every other case an odd one. */
+export const anyCase = (seed: number): RandomCase =>
+  seed % 2 === 1 ? oddCase(seed) : randomCase(seed);

@@ -1,6 +1,8 @@
+import { readdirSync, readFileSync } from 'node:fs';
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { CHECKS, runChecks, standsFor, type Finding, type Status } from '@/lib/checks';
+import { parseExchange } from '@/lib/layout/exchange';
 import { oddCase } from '../../odd-sheet';
 import { cases, randomCase, type RandomCase } from '../../random-sheet';
 import { compareArcs, compareFindings, twinFindings, twinStandsFor } from '../../twins';
@@ -39,6 +41,33 @@ test('the checks answer as their slow twins do', { timeout: 1_800_000 }, () => {
     const seen = (status: Status): boolean => answered.has(`${id} ${status}`);
     expect(seen('not-met') || seen('caution') || seen('not-known'), id).toBe(true);
     expect(seen('meets'), id).toBe(true);
+  }
+});
+
+const FOLDER = new URL('../../fixtures/exchange/', import.meta.url);
+const files = readdirSync(FOLDER).filter((name) => name.endsWith('.geojson'));
+const read = (name: string) => JSON.parse(readFileSync(new URL(name, FOLDER), 'utf8'));
+
+/** The twins are held to the same outside answers as the checks are, lest both be wrong alike. */
+test.each(files)('the twins give the answers beside %s', (name) => {
+  const file = parseExchange(read(name));
+  if (!file.ok) throw new Error(`${name} does not parse`);
+  const { sheet, limits } = file;
+  const twins = new Map(
+    twinFindings({ ...sheet, limits, asOf: sheet.layout.planned_at }).map((twin) => [
+      twin.id,
+      twin,
+    ]),
+  );
+  for (const [id, expected] of Object.entries<{ status: Status; value?: number }>(
+    read(name.replace('.geojson', '.expected.json')),
+  )) {
+    const twin = twins.get(id);
+    expect(twin?.status, id).toBe(expected.status);
+    if (expected.value === undefined) continue;
+    expect(Math.abs(twin!.value! - expected.value), id).toBeLessThan(
+      twin!.unit === 'ratio' ? 0.001 : 0.03,
+    );
   }
 });
 

@@ -2,7 +2,6 @@
 import { readFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { Refusal } from './refusal.mjs';
-import { tail } from './run.mjs';
 import { step } from './say.mjs';
 import { runScript } from './tool.mjs';
 
@@ -12,24 +11,21 @@ import { runScript } from './tool.mjs';
  * Brings the tables up to date and lays the demo in once.
  * @param {string} root
  * @param {NodeJS.ProcessEnv} env with DATABASE_URL and STILLGROUND_DATA
+ * @param {{ ownServer: boolean }} [options] whether the server is one that a person named
  */
-export async function prepareData(root, env) {
-  await script(root, env, 'Bringing the database up to date', 'scripts/migrate.ts');
-  await script(root, env, 'Laying in the demo', 'scripts/seed.ts');
-}
-
-/**
- * @param {string} root
- * @param {NodeJS.ProcessEnv} env
- * @param {string} label
- * @param {string} file
- */
-async function script(root, env, label, file) {
-  const { code, output } = await step(label, () => runScript(root, file, { env, live: true }));
-  if (code !== 0) {
-    throw new Refusal(
-      `${label} failed (${file}); nothing was started. If DATABASE_URL is set, check it. This was said:\n${tail(output)}`,
-    );
+export async function prepareData(root, env, { ownServer } = { ownServer: false }) {
+  const advice = ownServer
+    ? 'check that DATABASE_URL is right and its server reachable, then run the command again'
+    : 'put right what it says and run the command again';
+  const scripts = /** @type {const} */ ([
+    ['Bringing the database up to date', 'scripts/migrate.ts'],
+    ['Laying in the demo', 'scripts/seed.ts'],
+  ]);
+  for (const [label, file] of scripts) {
+    await step(label, async () => {
+      const { code } = await runScript(root, file, { env, live: true });
+      if (code !== 0) throw new Refusal(`${label} failed, as said above; ${advice}.`);
+    });
   }
 }
 

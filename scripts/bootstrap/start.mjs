@@ -42,7 +42,7 @@ export async function start({ dev }) {
     DATABASE_URL: settings.databaseUrl ?? database?.url,
     NEXTAUTH_SECRET: settings.nextAuthSecret ?? keptSecrets(dataFolder).nextAuthSecret,
   };
-  await prepareData(root, env);
+  await prepareData(root, env, { ownServer: settings.databaseUrl !== null });
   if (!dev) await ensureBuild(root, env);
 
   /** @param {number} port */

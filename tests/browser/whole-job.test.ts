@@ -33,6 +33,9 @@ const PLACES = {
   z: [-60, 104],
 } as const satisfies Record<string, Feet | readonly Feet[]>;
 
+/** A loaded machine answers later than one at rest. */
+const SOON = { timeout: 15_000 };
+
 const OPEN = 'li[data-status="not-met"], li[data-status="not-known"]';
 const checks = (page: Page) => page.getByRole('region', { name: 'Checks' });
 const openChecks = (page: Page): Promise<string[]> => checks(page).locator(OPEN).allTextContents();
@@ -95,7 +98,7 @@ async function reloadsIdentical(page: Page, layoutId: string): Promise<void> {
   await page.reload();
   await drawingReady(page);
   expect(await stored(page, layoutId)).toEqual(before);
-  await expect.poll(() => pieceNames(page)).toEqual(names);
+  await expect.poll(() => pieceNames(page), SOON).toEqual(names);
 }
 
 describe('the whole job', () => {
@@ -121,25 +124,25 @@ describe('the whole job', () => {
     await place(page, 'Z probe', PLACES.z);
     await letGo(page);
     await enterConditions(page);
-    await expect.poll(() => openChecks(page)).toEqual([]);
+    await expect.poll(() => openChecks(page), SOON).toEqual([]);
 
     // Too far from its partner: not met, shown while it is dragged, and undone again.
     await drag(page, PLACES.rods[3], [-24, 68]);
     await expect
-      .poll(() => checks(page).locator('li[data-status="not-met"]').count())
+      .poll(() => checks(page).locator('li[data-status="not-met"]').count(), SOON)
       .toBeGreaterThan(0);
     const remedy = checks(page)
       .getByRole('button', { name: /^Move R2/ })
       .first();
     await remedy.click();
-    await expect.poll(() => openChecks(page)).toEqual([]);
+    await expect.poll(() => openChecks(page), SOON).toEqual([]);
 
     await reloadsIdentical(page, layoutId);
-    await expect.poll(() => openChecks(page)).toEqual([]);
+    await expect.poll(() => openChecks(page), SOON).toEqual([]);
 
     await clickPiece(page, 'C2');
     await page.getByRole('button', { name: 'Remove C2' }).click();
-    await expect.poll(() => pieceNames(page)).not.toContain('C2, rod, meets');
+    await expect.poll(() => pieceNames(page), SOON).not.toContain('C2, rod, meets');
     await saved(page);
     await page.getByRole('button', { name: 'More' }).click();
     await page.getByRole('link', { name: 'History of this layout' }).click();
@@ -149,7 +152,7 @@ describe('the whole job', () => {
     await page.getByRole('button', { name: /^Make version \d+ the newest$/ }).click();
     await page.getByRole('link', { name: 'Open the drawing' }).click();
     await drawingReady(page);
-    await expect.poll(() => pieceNames(page)).toContain('C2, rod, meets');
+    await expect.poll(() => pieceNames(page), SOON).toContain('C2, rod, meets');
 
     await page.getByRole('link', { name: 'Handout' }).click();
     await page.waitForURL(/\/handout/);
@@ -170,14 +173,16 @@ describe('the whole job', () => {
     await page.locator('[data-stop]', { hasText: 'Casualty' }).focus();
     await page.keyboard.press('Enter');
     await expect
-      .poll(() => page.evaluate(() => document.activeElement?.classList.contains('plan-map')))
+      .poll(() => page.evaluate(() => document.activeElement?.classList.contains('plan-map')), SOON)
       .toBe(true);
     for (const key of ['ArrowUp', 'ArrowDown', 'Enter']) await page.keyboard.press(key);
     const casualty = page.locator('button[data-piece][aria-label^="Casualty vehicle"]');
     await casualty.focus();
     for (let turn = 0; turn < 12; turn++) await page.keyboard.press(']');
     await casualty.press('Enter');
-    await expect.poll(() => page.getByLabel('Heading', { exact: true }).inputValue()).toBe('60');
+    await expect
+      .poll(() => page.getByLabel('Heading', { exact: true }).inputValue(), SOON)
+      .toBe('60');
     await page.keyboard.press('Escape');
 
     await addFromTable(page, 'release point', PLACES.leak);
@@ -188,18 +193,18 @@ describe('the whole job', () => {
     for (const rod of PLACES.rods) await addFromTable(page, 'rod', rod);
     await addFromTable(page, 'Z probe', PLACES.z);
     await enterConditions(page);
-    await expect.poll(() => openChecks(page)).toEqual([]);
+    await expect.poll(() => openChecks(page), SOON).toEqual([]);
 
     // Arrow keys on the plan: out of the band, heard at rest, and back by undo.
     const rod = page.locator('button[data-piece][aria-label^="R2,"]');
     await rod.focus();
     for (let step = 0; step < 6; step++) await page.keyboard.press('ArrowUp');
     await expect
-      .poll(() => page.locator('[data-announcement]').textContent(), { timeout: 5000 })
+      .poll(() => page.locator('[data-announcement]').textContent(), SOON)
       .toMatch(/R2.*not met/);
     for (let step = 0; step < 6; step++) await page.keyboard.press('Control+z');
-    await expect.poll(() => pieceNames(page)).toContain('R2, rod, meets');
-    await expect.poll(() => openChecks(page)).toEqual([]);
+    await expect.poll(() => pieceNames(page), SOON).toContain('R2, rod, meets');
+    await expect.poll(() => openChecks(page), SOON).toEqual([]);
     await reloadsIdentical(page, layoutId);
   });
 });

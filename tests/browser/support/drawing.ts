@@ -88,12 +88,12 @@ export async function setFact(page: Page, label: string, value: string): Promise
 /** The layout's pieces by name and status; of the site's, only those in view have buttons. */
 export const pieceNames = (page: Page): Promise<string[]> =>
   page.locator('button[data-piece]').evaluateAll(
-    (buttons, siteKinds) =>
+    (buttons, siteKinds: readonly string[]) =>
       buttons
         .filter((b) => !siteKinds.includes(b.getAttribute('data-kind') ?? ''))
         .map((b) => b.getAttribute('aria-label') ?? '')
         .sort(),
-    [...SITE_KINDS],
+    SITE_KINDS as readonly string[],
   );
 
 /** Waits until the margin says that the server has everything. */

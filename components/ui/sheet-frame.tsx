@@ -41,7 +41,7 @@ export function SheetFrame({
       >
         <a
           href="#sheet"
-          className="sr-only bg-ink px-4 py-3 text-paper focus:not-sr-only focus:absolute focus:z-50"
+          className="sr-only bg-ink text-paper focus:not-sr-only focus:absolute focus:z-50 focus:px-4 focus:py-3"
         >
           Skip to the sheet
         </a>

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { layoutPiece, siteFeature, UTILITIES } from './pieces';
 import { above, between, direction, instant, lonLat, words } from './values';
 

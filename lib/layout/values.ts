@@ -1,4 +1,5 @@
-import { z } from 'zod';
+// A namespace import: bundlers then leave zod's fifty languages out of the page.
+import * as z from 'zod';
 import type { LonLat } from '../geo';
 
 /** The small values that layouts, sites and requests are made of, each with a plain complaint. */

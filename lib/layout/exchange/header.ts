@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { LIMIT_KEYS, type LimitKey } from '../../limits';
 import {
   ANSWER_CLASSES,

@@ -1,6 +1,7 @@
 'use client';
 
 import { useMemo } from 'react';
+import { dateTimeWords } from '@/components/conditions/time-words';
 import { useReadersZone } from '@/components/ui/when';
 import { groundSeen, PAPERS, pxPerMetreAt, SCALES, scaleThatFits } from '@/lib/draw';
 import { piecesOf, placeOf, planeOf } from '@/lib/layout';
@@ -92,6 +93,9 @@ export function Handout({ input, choice }: { input: HandoutInput; choice: Handou
           <div className="table-page">
             <header>
               <h2>{sheet.layout.name ?? 'Not named yet'}</h2>
+              <span>
+                version {input.version}, saved {dateTimeWords(input.savedAt, zone)}
+              </span>
               <strong>NOT APPROVED</strong>
             </header>
             {parts.map((part) => (

@@ -5,7 +5,7 @@ import {
   swingWords,
   downhillWords,
 } from '@/components/conditions/condition-words';
-import { dateTimeWords } from '@/components/conditions/time-words';
+import { clockWords } from '@/components/conditions/time-words';
 import { countFindings } from '@/components/checks/count-findings';
 import { firstToFailWords } from '@/components/checks/first-to-fail-words';
 import { liquidWords } from '@/components/title-block/liquid-words';
@@ -31,8 +31,6 @@ type StripProps = {
   heightMm: number;
 };
 
-/** Blanks that stand on the first page; the others follow on the next. */
-const FIRST_BLANKS = 1;
 const COUNTED: readonly Status[] = ['not-met', 'not-known', 'caution', 'meets'];
 
 /** The right strip: how far it has come, the wind, the facts, what to fill in, the title block. */
@@ -53,28 +51,33 @@ export function Strip({ input, blanks, units, scale, zone, heightMm }: StripProp
       </p>
       <Weather input={input} zone={zone} />
       <Facts input={input} units={units} />
-      {blanks.length > 0 && (
-        <section className="strip-part">
-          <h3>
-            {blanks.length} {blanks.length === 1 ? 'blank' : 'blanks'} to fill
-            {blanks.length > FIRST_BLANKS && ', all listed behind'}
-          </h3>
-          {blanks.slice(0, FIRST_BLANKS).map(({ number, form }) => (
-            <p key={number} className="strip-blank">
-              <BlankNumber number={number} />
-              <span>
-                <BlankForm form={form} />
-              </span>
-            </p>
-          ))}
-        </section>
-      )}
+      <BlanksToFill blanks={blanks} />
       <section className="strip-part rest">
-        <h3>Legend</h3>
+        <h2>Legend</h2>
         <Legend sheet={input.sheet} />
       </section>
       <TitleBlock input={input} units={units} scale={scale} zone={zone} />
     </div>
+  );
+}
+
+/** A single blank stands here; of several only how many, for they are listed behind. */
+function BlanksToFill({ blanks }: { blanks: readonly Blank[] }) {
+  const [only, ...others] = blanks;
+  if (!only) return null;
+  if (others.length > 0) {
+    return <h2 className="strip-part">{blanks.length} blanks to fill, listed behind</h2>;
+  }
+  return (
+    <section className="strip-part">
+      <h2>1 blank to fill</h2>
+      <p className="strip-blank">
+        <BlankNumber number={only.number} />
+        <span>
+          <BlankForm form={only.form} />
+        </span>
+      </p>
+    </section>
   );
 }
 
@@ -97,8 +100,12 @@ function Weather({ input, zone }: { input: HandoutInput; zone: string }) {
         <p>
           <strong>{windFromWords(conditions.wind) ?? 'Wind not known'}</strong>
         </p>
-        <p>{wind.filter(Boolean).join(', ') || 'speed and swing not known'}</p>
-        <p>{seen ? `seen ${dateTimeWords(seen, zone)}` : 'time not known'}</p>
+        {conditions.wind && (
+          <>
+            <p>{wind.filter(Boolean).join(', ') || 'speed and swing not known'}</p>
+            <p>{seen ? `seen ${clockWords(seen, input.asOf, zone)}` : 'time not known'}</p>
+          </>
+        )}
         <p>
           <strong>{[stands.alarm, stands.words].filter(Boolean).join('. ')}</strong>
         </p>

@@ -17,16 +17,17 @@ export function TitleBlock({
   scale: Scale;
   zone: string;
 }) {
+  const { name, planned_at: planned } = input.sheet.layout;
   return (
     <section className="title-block">
-      <h2>{input.sheet.layout.name ?? 'Not named yet'}</h2>
+      <h2>{name ?? 'Not named yet'}</h2>
       <dl>
         <Cell name="Site">{input.siteName}</Cell>
         <Cell name="Agency">{input.agencyName}</Cell>
         <Cell name="Drawn by">{input.drawnBy ?? '–'}</Cell>
         <Cell name="Checked by">not checked</Cell>
         <Cell name="Revision">draft, version {input.version}</Cell>
-        <Cell name="Saved">{dateTimeWords(input.savedAt, zone)}</Cell>
+        <Cell name="Planned start">{planned ? dateTimeWords(planned, zone) : 'not planned'}</Cell>
       </dl>
       <ScaleBar units={units} scale={scale} />
     </section>

@@ -4,13 +4,8 @@ import 'leaflet/dist/leaflet.css';
 import '@/components/map-paper/map-paper.css';
 import '@/components/drawing/map/plan-map.css';
 import { useMemo } from 'react';
-import {
-  AttributionControl,
-  MapContainer,
-  ScaleControl,
-  TileLayer,
-  ZoomControl,
-} from 'react-leaflet';
+import { AttributionControl, MapContainer, ScaleControl, ZoomControl } from 'react-leaflet';
+import { BaseMapTiles } from '@/components/map-paper/base-map-tiles';
 import { Graticule } from '@/components/map-paper/graticule';
 import type { SiteAnswer } from '@/lib/api';
 import type { LonLat } from '@/lib/geo';
@@ -45,18 +40,7 @@ export function SitePreview({ site }: { site: SiteAnswer }) {
         zoomControl={false}
         className="map-paper plan-map h-80 border border-ink lg:h-[28rem]"
       >
-        {map ? (
-          <TileLayer
-            url={`/tiles/${map.pack}/${map.version}/{z}/{x}/{y}`}
-            minZoom={map.min_zoom}
-            maxNativeZoom={map.max_zoom}
-            maxZoom={CLOSEST_ZOOM}
-            bounds={bounds ?? undefined}
-            attribution={map.attribution}
-          />
-        ) : (
-          <Graticule />
-        )}
+        {map ? <BaseMapTiles map={map} deepestZoom={CLOSEST_ZOOM} /> : <Graticule />}
         <GroundOver siteId={site.id} origin={origin} />
         <AttributionControl prefix={false} position="bottomleft" />
         <ZoomControl position="topright" />

@@ -4,7 +4,8 @@ import 'leaflet/dist/leaflet.css';
 import './plan-map.css';
 import { useMemo, useRef } from 'react';
 import { createPortal } from 'react-dom';
-import { MapContainer, TileLayer, useMap } from 'react-leaflet';
+import { MapContainer, useMap } from 'react-leaflet';
+import { BaseMapTiles } from '@/components/map-paper/base-map-tiles';
 import { planeAt } from '@/lib/layout';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
 import { placesToShow } from './first-view';
@@ -38,17 +39,7 @@ export default function DrawingMap() {
       boxZoom={false}
       className="plan-map absolute inset-0"
     >
-      {baseMap && (
-        <TileLayer
-          url={`/tiles/${baseMap.pack}/${baseMap.version}/{z}/{x}/{y}`}
-          minZoom={WIDEST_ZOOM}
-          maxZoom={DEEPEST_ZOOM}
-          minNativeZoom={baseMap.min_zoom}
-          maxNativeZoom={baseMap.max_zoom}
-          bounds={boundsOf(baseMap.bounds)}
-          keepBuffer={4}
-        />
-      )}
+      {baseMap && <BaseMapTiles map={baseMap} deepestZoom={DEEPEST_ZOOM} />}
       <OverTheMap />
     </MapContainer>
   );
@@ -71,11 +62,3 @@ function OverTheMap() {
     </>
   );
 }
-
-const boundsOf = ([west, south, east, north]: readonly [number, number, number, number]): [
-  [number, number],
-  [number, number],
-] => [
-  [south, west],
-  [north, east],
-];

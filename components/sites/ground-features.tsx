@@ -1,6 +1,6 @@
 import { CLASS_WORDS } from '@/lib/checks/buried-lines-known';
 import { piecesOf, type SiteGround } from '@/lib/layout';
-import { positionWords } from './position-entry';
+import { formatPosition } from '@/lib/geo';
 
 /** What is drawn on the site, for reading: it is changed on the drawing. */
 export function GroundFeatures({ ground }: { ground: SiteGround }) {
@@ -48,7 +48,7 @@ export function GroundFeatures({ ground }: { ground: SiteGround }) {
               <strong>
                 {[point.label, point.name].filter(Boolean).join(' ') || 'Fixed point'}
               </strong>
-              <span className="block">{positionWords(point.at)}</span>
+              <span className="block">{formatPosition(point.at, 'decimal')}</span>
             </li>
           ))}
           <Count count={metal.length} one="metal line" many="metal lines" />

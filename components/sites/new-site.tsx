@@ -8,15 +8,18 @@ import { Dialog } from '@/components/ui/dialog';
 import { Field, Input } from '@/components/ui/field';
 import { Problems } from '@/components/ui/problems';
 import { createSite, Problem } from '@/lib/client/api';
-import { parsePosition } from './position-entry';
+import { parsePosition, quantise } from '@/lib/geo';
 
-const POSITION_COMPLAINT =
-  'Write latitude, then longitude, in degrees: 46.601234, -112.034567. West and south are minus.';
-
-/** A fresh array: requests are sent with plain lists. */
+/** Null where nothing is entered: a site may be known before its place is. */
 function placed(position: string): number[] | null {
-  const at = parsePosition(position);
-  return at && [...at];
+  const read = parsePosition(position);
+  return read.ok ? [...quantise(read.place)] : null;
+}
+
+function complaintAbout(position: string): string | true {
+  if (position.trim() === '') return true;
+  const read = parsePosition(position);
+  return read.ok || read.message;
 }
 
 /** The button and the sheet on which a site is entered. */
@@ -86,15 +89,14 @@ function NewSiteForm() {
       </Field>
       <Field
         label="Position"
-        hint="Latitude, longitude in degrees (WGS 84)"
+        hint="Latitude and longitude, or a US National Grid reference (WGS 84)"
         error={errors.position?.message}
       >
         {(ties) => (
           <Input
             {...ties}
             {...register('position', {
-              validate: (value) =>
-                value.trim() === '' || parsePosition(value) !== null || POSITION_COMPLAINT,
+              validate: complaintAbout,
             })}
             inputMode="text"
             autoComplete="off"

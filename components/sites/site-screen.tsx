@@ -1,7 +1,7 @@
 import type { SiteAnswer } from '@/lib/api';
 import { GroundSection } from './ground-section';
 import { LayoutsSection } from './layouts-section';
-import { positionWords } from './position-entry';
+import { formatPosition } from '@/lib/geo';
 import { SitePreview } from './site-preview-lazy';
 import { StartLayout } from './start-layout';
 
@@ -19,7 +19,7 @@ export function SiteScreen({
       <p>
         {site.where ?? 'Place not entered'}
         <span className="text-ink-soft">
-          {site.at ? `, ${positionWords(site.at)}` : ', position not entered'}
+          {site.at ? `, ${formatPosition(site.at, 'decimal')}` : ', position not entered'}
         </span>
       </p>
       {site.notes && <p className="mt-2 max-w-[68ch] whitespace-pre-line">{site.notes}</p>}

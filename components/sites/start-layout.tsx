@@ -10,8 +10,8 @@ import { Problems } from '@/components/ui/problems';
 import type { CreatedLayout, NewLayout, SiteAnswer } from '@/lib/api';
 import { MOST_BYTES } from '@/lib/api/common';
 import { createLayout, Problem, useLayouts } from '@/lib/client/api';
+import { parsePosition, quantise } from '@/lib/geo';
 import { readExchangeFile } from './exchange-file';
-import { parsePosition } from './position-entry';
 
 const SOURCES = ['nothing', 'layout', 'file'] as const;
 type Source = (typeof SOURCES)[number];
@@ -52,10 +52,10 @@ export function StartLayout({ site }: { site: SiteAnswer }) {
       return read.ok ? { ...base, from: { file: read.file, takeGround } } : read.why;
     }
     if (!needsPosition) return base;
-    const at = parsePosition(position);
-    return at
-      ? { ...base, origin: [...at] }
-      : 'This site has no position. Enter latitude, longitude in degrees: 46.601234, -112.034567.';
+    const read = parsePosition(position);
+    return read.ok
+      ? { ...base, origin: [...quantise(read.place)] }
+      : `This site has no position yet. ${read.message}`;
   }
 
   async function start(event: React.FormEvent) {
@@ -146,7 +146,7 @@ export function StartLayout({ site }: { site: SiteAnswer }) {
         {needsPosition && (
           <Field
             label="Where the plan begins"
-            hint="Latitude, longitude in degrees; this site has no position yet"
+            hint="Latitude and longitude, or a US National Grid reference; this site has no position yet"
           >
             {(ties) => (
               <Input

@@ -212,12 +212,12 @@ describe('sites', () => {
     await page.getByLabel('Name', { exact: true }).fill('Kettle Road tank farm');
     await page.getByLabel('Position').fill('somewhere');
     await page.getByRole('button', { name: 'Enter the site' }).click();
-    await page.getByText('Write latitude, then longitude', { exact: false }).waitFor();
+    await page.getByText('Not understood. Write latitude', { exact: false }).waitFor();
     await page.getByLabel('Position').fill('42.2, -100.9');
     await page.getByRole('button', { name: 'Enter the site' }).click();
     await page.getByRole('heading', { level: 1, name: 'Kettle Road tank farm' }).waitFor();
     await page.getByText('Nothing has been drawn here yet.', { exact: false }).waitFor();
-    await page.getByText('42.200000, -100.900000', { exact: false }).waitFor();
+    await page.getByText('42.200000° N, 100.900000° W', { exact: false }).waitFor();
   });
 
   test('a crew member sees the site but no way to change it', async () => {

@@ -6,6 +6,7 @@ import { distance, type LocalPlane, type Vec } from '@/lib/geo';
 import { findPiece, placesOf, type Piece, type Sheet } from '@/lib/layout';
 import type { Under } from '@/lib/client/tools';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
+import { screenStore } from '../screen-store';
 import { pieceSentence, worstFinding } from '../piece-words';
 import type { PlanView } from './plan-view';
 import { useViewStore } from './view-store';
@@ -47,7 +48,10 @@ export function PieceButtons({ plane, view }: { plane: LocalPlane; view: PlanVie
           name={nameOf(sheet, piece, findings)}
           at={inside(view.toPx(seatOf(placesOf(plane, piece))), view)}
           selected={piece.id === selection}
-          onSelect={() => store.getState().select(piece.id)}
+          onSelect={() => {
+            store.getState().select(piece.id);
+            screenStore.getState().openTag(true);
+          }}
           onFocus={() => {
             store.getState().hover(piece.id);
             bringIntoView(piece.id);

@@ -12,6 +12,7 @@ import {
   type ToolState,
 } from '@/lib/client/tools';
 import { useDrawingStore } from '@/lib/client/use-drawing';
+import { screenStore } from '../screen-store';
 import { newPieceId } from '../new-piece-id';
 import { sayAtRest } from './say-at-rest';
 
@@ -71,7 +72,10 @@ function carryOut(store: DrawingStore, step: Step): void {
   } else if (step.preview !== undefined) {
     if (step.preview !== null || store.getState().preview !== null) setPreview(step.preview);
   }
-  if (step.select !== undefined) select(step.select);
+  if (step.select !== undefined) {
+    select(step.select);
+    screenStore.getState().openTag(step.select !== null);
+  }
   if (step.putDown) putDown();
   if (step.announce && !step.edits) announce(step.announce);
 }

@@ -3,11 +3,12 @@
 import dynamic from 'next/dynamic';
 import { useState } from 'react';
 import { FIELD_CAUTION_WORDS } from '@/components/ui/caution';
-import { ChecksPanel } from '@/components/checks/checks-panel';
+import { CheckStepper, ChecksPanel } from '@/components/checks';
 import { ConditionsPanel, WindChip } from '@/components/conditions';
 import { KitShelf } from '@/components/kit';
 import { undoLabel } from '@/lib/edits';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
+import { useScreen } from '../screen-store';
 import { StakeTag } from '../tag/stake-tag';
 import { Complaint } from './complaint';
 import { IndexTabs } from './index-tabs';
@@ -31,6 +32,8 @@ export function PhoneSheet() {
   const selection = useDrawing((state) => state.selection);
   const back = useDrawing((state) => undoLabel(state.history));
   const name = useDrawing((state) => state.sheet.layout.name);
+  const tagOpen = useScreen((state) => state.tagOpen);
+  const shownPiece = tagOpen ? selection : null;
 
   const show = (next: Panel): void => {
     setPanel(next);
@@ -38,7 +41,7 @@ export function PhoneSheet() {
   };
 
   return (
-    <div className="flex h-dvh flex-col">
+    <div className="flex h-dvh min-h-[36rem] flex-col">
       <header className="flex items-center justify-between gap-2 px-3">
         <div className="min-w-0 leading-tight">
           <p className="truncate text-lg font-bold">{name ?? 'Not named yet'}, draft</p>
@@ -71,7 +74,7 @@ export function PhoneSheet() {
             <button
               key={one}
               type="button"
-              aria-pressed={panel === one && selection === null}
+              aria-pressed={panel === one && shownPiece === null}
               className="min-h-11 cursor-pointer border-r border-ink px-1 last:border-r-0 aria-pressed:bg-ink aria-pressed:font-bold aria-pressed:text-paper"
               onClick={() => show(one)}
             >
@@ -80,9 +83,10 @@ export function PhoneSheet() {
           ))}
         </div>
         <div className="min-h-0 grow overflow-y-auto overscroll-contain">
-          {selection !== null ? (
-            <div className="px-3 py-2">
-              <StakeTag key={selection} id={selection} roomy />
+          {shownPiece !== null ? (
+            <div className="space-y-3 px-3 py-2">
+              <StakeTag key={shownPiece} id={shownPiece} roomy />
+              <CheckStepper pieceId={shownPiece} />
             </div>
           ) : (
             <PanelOf panel={panel} />
@@ -97,7 +101,14 @@ export function PhoneSheet() {
 function PanelOf({ panel }: { panel: Panel }) {
   switch (panel) {
     case 'Checks':
-      return <ChecksPanel />;
+      return (
+        <>
+          <div className="border-b border-ink px-3 py-2">
+            <CheckStepper />
+          </div>
+          <ChecksPanel />
+        </>
+      );
     case 'Place':
       return <KitShelf />;
     case 'Wind':

@@ -32,7 +32,7 @@ const post = (page: Page, path: string, body: object) =>
     [path, JSON.stringify(body)] as const,
   );
 
-/** A site of the test's own, so that the demo stays as the other tests expect it. */
+/** A site of the test's own, last in the list, so that the demo stays as other tests expect it. */
 async function ownSite(page: Page, name: string): Promise<string> {
   return `/sites/${await post(page, '/api/sites', { name, at: [-100.9, 42.2] })}`;
 }
@@ -209,13 +209,13 @@ describe('sites', () => {
     const page = await openPageAs('planner');
     await page.goto('/sites');
     await page.getByRole('button', { name: 'New site' }).click();
-    await page.getByLabel('Name', { exact: true }).fill('Kettle Road tank farm');
+    await page.getByLabel('Name', { exact: true }).fill('Yarrow Road tank farm');
     await page.getByLabel('Position').fill('somewhere');
     await page.getByRole('button', { name: 'Enter the site' }).click();
     await page.getByText('Not understood. Write latitude', { exact: false }).waitFor();
     await page.getByLabel('Position').fill('42.2, -100.9');
     await page.getByRole('button', { name: 'Enter the site' }).click();
-    await page.getByRole('heading', { level: 1, name: 'Kettle Road tank farm' }).waitFor();
+    await page.getByRole('heading', { level: 1, name: 'Yarrow Road tank farm' }).waitFor();
     await page.getByText('Nothing has been drawn here yet.', { exact: false }).waitFor();
     await page.getByText('42.200000° N, 100.900000° W', { exact: false }).waitFor();
   });
@@ -247,7 +247,7 @@ describe('a site’s ground', () => {
 
   test('an answer is entered, saved and there again after a reload', async () => {
     const page = await openPageAs('planner');
-    await page.goto(await ownSite(page, 'Answers for a test'));
+    await page.goto(await ownSite(page, 'Yarrow Road, answers'));
     await page.getByRole('button', { name: 'Change answers and tickets' }).click();
     await page.getByLabel('Sewer: owner’s answer').selectOption('waiting');
     await page.getByRole('button', { name: 'Add a ticket' }).click();
@@ -264,7 +264,7 @@ describe('a site’s ground', () => {
       await openPageAs('planner', { expectedComplaints: REFUSALS }),
       await openPageAs('safety-officer', { expectedComplaints: REFUSALS }),
     ];
-    const site = await ownSite(one, 'Two at once');
+    const site = await ownSite(one, 'Yarrow Road, two at once');
     for (const page of [one, other]) {
       await page.goto(site);
       await page.getByRole('button', { name: 'Change answers and tickets' }).click();
@@ -287,7 +287,7 @@ describe('a site’s ground', () => {
 
 describe('starting a layout', () => {
   const start = async (page: Page, file: { name: string; content: string }) => {
-    await page.goto(await ownSite(page, file.name));
+    await page.goto(await ownSite(page, `Yarrow Road, ${file.name}`));
     await page.getByLabel('from an exchange file').check();
     await page.getByLabel('Exchange file', { exact: true }).setInputFiles({
       name: file.name,
@@ -336,9 +336,9 @@ describe('starting a layout', () => {
 
   test('a copy of a layout opens as its own drawing', async () => {
     const page = await openPageAs('planner');
-    await ownLayout(page, 'To be copied');
+    await ownLayout(page, 'Yarrow Road, to be copied');
     await page.goto('/sites');
-    await page.getByRole('link', { name: 'To be copied' }).first().click();
+    await page.getByRole('link', { name: 'Yarrow Road, to be copied' }).first().click();
     await page.getByLabel('from a layout of this site').check();
     await page.getByLabel('Name', { exact: true }).fill('Copy for a test');
     await page.getByRole('button', { name: 'Start the layout' }).click();
@@ -349,7 +349,7 @@ describe('starting a layout', () => {
 describe('history', () => {
   test('an older version is looked at and restored, and nothing is lost', async () => {
     const page = await openPageAs('planner');
-    const layoutId = await ownLayout(page, 'Looked back at');
+    const layoutId = await ownLayout(page, 'Yarrow Road, looked back at');
     const path = `/layouts/${layoutId}/history`;
     // A second version, saved as the drawing saves.
     const status = await page.evaluate(async (id) => {

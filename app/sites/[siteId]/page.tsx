@@ -1,5 +1,7 @@
 import type { Metadata } from 'next';
+import { cache } from 'react';
 import { signedInPage } from '@/app/_shell/signed-in-page';
+import { titleFor } from '@/app/_shell/title-for';
 import { SignedInSheet } from '@/app/_shell/signed-in-sheet';
 import { SiteScreen } from '@/components/sites/site-screen';
 import { Caution } from '@/components/ui/caution';
@@ -11,13 +13,21 @@ import { listLayouts } from '@/lib/server/layouts/list-layouts';
 import { readGround } from '@/lib/server/sites/read-ground';
 import { readSite } from '@/lib/server/sites/read-site';
 
-export const metadata: Metadata = { title: 'Site' };
+type Props = { params: Promise<{ siteId: string }> };
 
-export default async function SitePage({ params }: { params: Promise<{ siteId: string }> }) {
+const read = cache(readSite);
+
+/** The site's name; whatever keeps it from being read is told by the page itself. */
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { siteId } = await params;
+  return { title: await titleFor('Site', async (person) => (await read(person, siteId)).name) };
+}
+
+export default async function SitePage({ params }: Props) {
   const { siteId } = await params;
   return signedInPage(`/sites/${siteId}`, async (person) => {
     const [site, ground, layouts] = await Promise.all([
-      readSite(person, siteId),
+      read(person, siteId),
       readGround(person, siteId),
       listLayouts(person, siteId, { limit: PAGE_ROWS }),
     ]);

@@ -1,6 +1,8 @@
 import type { Metadata } from 'next';
+import { cache } from 'react';
 import { signedInPage } from '@/app/_shell/signed-in-page';
 import { SignedInSheet } from '@/app/_shell/signed-in-sheet';
+import { titleFor } from '@/app/_shell/title-for';
 import { HistoryScreen } from '@/components/history/history-screen';
 import { Fetched } from '@/components/shell/fetched';
 import { ButtonLink } from '@/components/ui/button';
@@ -8,27 +10,38 @@ import { Caution } from '@/components/ui/caution';
 import { can } from '@/lib/access';
 import { PAGE_ROWS } from '@/lib/api/common';
 import { PATHS } from '@/lib/client/api/paths';
+import { layoutName } from '@/lib/server/layouts/document';
 import { listChanges } from '@/lib/server/layouts/list-changes';
 import { readChange } from '@/lib/server/layouts/read-change';
 import { readLayout } from '@/lib/server/layouts/read-layout';
-
-export const metadata: Metadata = { title: 'History' };
 
 type Props = {
   params: Promise<{ layoutId: string }>;
   searchParams: Promise<{ version?: string | string[] }>;
 };
 
+const read = cache(readLayout);
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { layoutId } = await params;
+  return {
+    title: await titleFor('History', async (person) => {
+      const { layout } = await read(person, layoutId);
+      return `History of ${layoutName(layout.name)}`;
+    }),
+  };
+}
+
 export default async function HistoryPage({ params, searchParams }: Props) {
   const { layoutId } = await params;
   const { version } = await searchParams;
   return signedInPage(`/layouts/${layoutId}/history`, async (person) => {
-    const layout = await readLayout(person, layoutId);
+    const layout = await read(person, layoutId);
     const [shown, changes] = await Promise.all([
       readChange(person, layoutId, shownVersion(version, layout.version)),
       listChanges(person, layoutId, { limit: PAGE_ROWS }),
     ]);
-    const name = layout.layout.name ?? 'Layout without a name';
+    const name = layoutName(layout.layout.name);
     return (
       <SignedInSheet
         person={person}

@@ -60,11 +60,13 @@ function judge({ run, feet: length }: Needed, kit: Kit | null, item: KitItem | n
   const value = measured(length, 'ft');
   if (!kit) {
     return answer(rule, [run.id], 'not-known', `${name} needs ${feet(length)}; no kit is chosen`, {
+      measured: value,
       missing: ['kit'],
     });
   }
   if (run.kind === 'hose' && run.diameter_in === undefined) {
     return answer(rule, [run.id], 'not-known', `The diameter of ${name} is not entered`, {
+      measured: value,
       missing: ['kit'],
     });
   }

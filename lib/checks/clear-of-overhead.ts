@@ -37,17 +37,6 @@ function judge(input: CheckInput, subject: Subject, line: PieceOf<'overhead-line
   }
   if (subject.outOfUse) return answer(rule, about, 'n/a', NOT_IN_USE);
   const least = line.volts === undefined ? null : overheadClearanceFeet(line.volts);
-  if (least === null) {
-    return answer(
-      rule,
-      about,
-      'not-known',
-      line.volts === undefined
-        ? `The voltage of ${nameOf(line)} is not entered; drawn at ${OVERHEAD_CLEARANCE.unknownDrawnFeet} ft`
-        : `${nameOf(line)} is above the table: ask its owner what to keep`,
-      { missing: ['voltage'] },
-    );
-  }
   const plane = planeOf(input.layout);
   const path = placesOf(plane, line)[0]!;
   const feetFrom = (at: Vec): number => {
@@ -56,6 +45,17 @@ function judge(input: CheckInput, subject: Subject, line: PieceOf<'overhead-line
     return path.some((v) => insideFootprint(v, shape)) ? 0 : metresToFeet(pathToPath(shape, path));
   };
   const clear = feetFrom(subject.at);
+  if (least === null) {
+    return answer(
+      rule,
+      about,
+      'not-known',
+      line.volts === undefined
+        ? `The voltage of ${nameOf(line)} is not entered; drawn at ${OVERHEAD_CLEARANCE.unknownDrawnFeet} ft`
+        : `${nameOf(line)} is above the table: ask its owner what to keep`,
+      { measured: measured(clear, 'ft'), missing: ['voltage'] },
+    );
+  }
   const meets = clear >= least;
   return answer(
     rule,

@@ -1,5 +1,5 @@
 import { angleBetween, threeDigits } from '../geo';
-import { standsFor, type WindArc } from './stands-for';
+import { standsFor, within } from './stands-for';
 import type { CheckInput } from './types';
 
 /** One thing that will stop meeting. `at` is an instant (ISO 8601) where time decides. */
@@ -57,12 +57,6 @@ function windPast(input: CheckInput): ComingFailure[] {
   const nearer =
     angleBetween(from, arc.from_deg) < angleBetween(from, arc.to_deg) ? arc.from_deg : arc.to_deg;
   return [{ kind: 'wind-past', words: `wind past ${threeDigits(nearer)}°`, at: null }];
-}
-
-/** Whether a direction lies in an arc, ends included. */
-export function within(arc: WindArc, direction: number): boolean {
-  const turn = (to: number): number => (((to - arc.from_deg) % 360) + 360) % 360;
-  return turn(direction) <= turn(arc.to_deg);
 }
 
 function ticketsEnd({ layout, site, asOf }: CheckInput): ComingFailure[] {

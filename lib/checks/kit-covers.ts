@@ -33,12 +33,13 @@ export const kitCovers: Check = {
   question: 'Does the kit reach?',
   title: 'The kit has enough of each',
   check({ layout }) {
-    const needs = [...needed(layout)].filter(([, count]) => count > 0);
+    const needs = [...needed(layout)];
     if (needs.length === 0) return [answer(rule, [], 'n/a', 'Nothing from a kit is drawn')];
     return needs.map(([kind, count]) => {
       const word = ITEM_WORDS[kind] ?? kind;
       if (!layout.kit) {
         return answer(rule, [kind], 'not-known', `${count} ${word} drawn; no kit is chosen`, {
+          measured: measured(count, 'count'),
           missing: ['kit'],
         });
       }
@@ -56,14 +57,20 @@ export const kitCovers: Check = {
   },
 };
 
-/** Probes, leads and tester serve one system at a time: the most that any one system needs. */
+/**
+ * How many of each kind that is drawn. Probes, leads and tester serve one system at a time: the
+ * most that any one system needs.
+ */
 function needed(layout: Layout): Map<KitKind, number> {
-  const counts = new Map<KitKind, number>(
-    DRAWN.map((kind) => [kind, piecesOf(layout.pieces, kind).length]),
-  );
-  const most = (count: (system: System) => number): number => Math.max(...SYSTEMS.map(count));
-  counts.set(
+  const counts = new Map<KitKind, number>();
+  const count = (kind: KitKind, drawn: number, need = drawn): void => {
+    if (drawn > 0) counts.set(kind, need);
+  };
+  const most = (need: (system: System) => number): number => Math.max(...SYSTEMS.map(need));
+  for (const kind of DRAWN) count(kind, piecesOf(layout.pieces, kind).length);
+  count(
     'probe',
+    piecesOf(layout.pieces, 'z-probe', 'y-probe').length,
     most(
       (system) =>
         Number(probeFor(layout, 'z-probe', system) !== null) +
@@ -71,11 +78,12 @@ function needed(layout: Layout): Map<KitKind, number> {
     ),
   );
   const leads = piecesOf(layout.pieces, 'test-lead');
-  counts.set(
+  count(
     'test-lead',
+    leads.length,
     most((system) => leads.filter((lead) => serves(layout, lead, system)).length),
   );
-  counts.set('tester', Math.min(1, piecesOf(layout.pieces, 'tester').length));
+  count('tester', piecesOf(layout.pieces, 'tester').length, 1);
   return counts;
 }
 

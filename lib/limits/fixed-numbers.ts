@@ -17,7 +17,7 @@ export const TRUE_POINT_RATIO = {
   value: 0.618,
 } as const satisfies Backing & { value: number };
 
-/** A right angle to the wind: beyond it a piece is downwind, whatever the agency's limit. */
+/** The wedge between wind and slope ends at a right angle to the wind, whatever limit is set. */
 export const CROSSWIND_DEG = 90;
 
 /** Diameter taken for a buried line whose own is not known, inches. */

@@ -66,7 +66,7 @@ export function cablesReach(scene: Scene): TwinFinding[] {
       const tie = less!.has(run.id) !== more!.has(run.id) || (twins && found!.size < runs.length);
       const status = found!.has(run.id) ? 'meets' : 'not-met';
       const unsized = run.kind === 'hose' && run.diameter_in === undefined;
-      if (!items || unsized) return tell(...rule, [run.id], 'not-known');
+      if (!items || unsized) return tell(...rule, [run.id], 'not-known', { value, unit: 'ft' });
       return tell(...rule, [run.id], status, { value, unit: 'ft', tie });
     });
   });
@@ -85,7 +85,6 @@ export function kitCovers(scene: Scene): TwinFinding[] {
     const ends = [...serving(system), ...scene.rods(system)].map(({ id }) => id);
     return scene.all('test-lead').filter(({ to }) => ends.includes(to)).length;
   };
-  // A probe or lead that serves no system is read as not drawn: nothing is needed of its kind.
   const needs: Record<string, number> = {
     probe: most((system) => serving(system).length),
     'test-lead': most(leadsOf),
@@ -95,12 +94,14 @@ export function kitCovers(scene: Scene): TwinFinding[] {
     needs[kind] = drawn(kind);
   const items = scene.layout.kit?.items ?? null;
   const told = Object.entries(needs)
-    .filter(([, needed]) => needed > 0)
+    .filter(([kind]) =>
+      kind === 'probe' ? drawn('z-probe') + drawn('y-probe') > 0 : drawn(kind as Kind) > 0,
+    )
     .map(([kind, needed]) => {
       const has = (items ?? [])
         .filter((item) => item.kind === kind)
         .reduce((sum, item) => sum + item.count, 0);
-      if (!items) return tell(...rule, [kind], 'not-known');
+      if (!items) return tell(...rule, [kind], 'not-known', { value: needed, unit: 'count' });
       const status = needed <= has ? 'meets' : 'not-met';
       return tell(...rule, [kind], status, { value: needed, unit: 'count' });
     });

@@ -119,7 +119,7 @@ export function clearOfOverhead(scene: Scene): TwinFinding[] {
           ? feetToPath(scene.flat(piece.at), path)
           : under(scene.footprint(piece)[0]!, path);
       const least = line.volts == null ? null : tableA(line.volts);
-      if (least === null) return tell(...rule, subjects, 'not-known');
+      if (least === null) return tell(...rule, subjects, 'not-known', { value, unit: 'ft' });
       const tie = near(value, 'ft', [least]);
       const status = value >= least ? 'meets' : 'not-met';
       return tell(...rule, subjects, status, { value, unit: 'ft', tie });

@@ -10,6 +10,7 @@ import { OverDrawing } from './over-drawing';
 import { KeepSaved } from './saving/keep-saved';
 import { Sheet } from './sheet/sheet';
 import { useClock } from './use-clock';
+import { useForethought } from './use-forethought';
 import { useShortcuts } from './use-shortcuts';
 
 export function DrawingScreen({ answer }: { answer: LayoutAnswer }) {
@@ -33,5 +34,6 @@ export function DrawingScreen({ answer }: { answer: LayoutAnswer }) {
 function Running() {
   useClock();
   useShortcuts();
+  useForethought();
   return null;
 }

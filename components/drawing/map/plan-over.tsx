@@ -1,6 +1,7 @@
 'use client';
 
-import { useCallback, useMemo } from 'react';
+import dynamic from 'next/dynamic';
+import { useCallback, useMemo, useState } from 'react';
 import { useMap } from 'react-leaflet';
 import { handleAt, handlesOf } from '@/lib/client/handles';
 import { piecesAt, REACH_PX } from '@/lib/client/hit-test';
@@ -15,7 +16,6 @@ import { GlideWith } from './glide-with';
 import { handList, jumperBand } from './hand-list';
 import { HandleButtons } from './handle-buttons';
 import { PieceButtons } from './piece-buttons';
-import { PlanStage } from './plan-stage';
 import { PlanWords } from './plan-words';
 import { onlyWords, withoutWords } from './split-list';
 import { usePlanFocus } from './use-plan-focus';
@@ -23,6 +23,9 @@ import { usePlanKeys } from './use-plan-keys';
 import { usePlanPointer } from './use-plan-pointer';
 import { sceneOf, usePlanTool } from './use-plan-tool';
 import { useView, useViewStore } from './view-store';
+
+/** The canvas comes after the plan answers; until then all of the list is painted as SVG. */
+const PlanStage = dynamic(() => import('./plan-stage'), { ssr: false });
 
 const NOTHING = { groups: [] };
 /** Handles are small; a mouse may miss them by this much, px. */
@@ -94,7 +97,12 @@ export function PlanOver({ plane }: { plane: LocalPlane }) {
 
   const groundShapes = useMemo(() => withoutWords(joined(grid, ground)), [grid, ground]);
   const planShapes = useMemo(() => withoutWords(plan), [plan]);
-  const words = useMemo(() => onlyWords(joined(ground, plan)), [ground, plan]);
+  const [canvasStands, setCanvasStands] = useState(false);
+  const onStands = useCallback(() => setCanvasStands(true), []);
+  const words = useMemo(
+    () => (canvasStands ? onlyWords(joined(ground, plan)) : joined(grid, ground, plan)),
+    [canvasStands, grid, ground, plan],
+  );
 
   const find = useCallback(
     (...[at, metresPerPx, pointer]: Parameters<Parameters<typeof usePlanPointer>[3]['find']>) => {
@@ -122,7 +130,13 @@ export function PlanOver({ plane }: { plane: LocalPlane }) {
   if (!view) return null;
   return (
     <>
-      <PlanStage ground={groundShapes} plan={planShapes} hand={hand} theme={theme} />
+      <PlanStage
+        ground={groundShapes}
+        plan={planShapes}
+        hand={hand}
+        theme={theme}
+        onStands={onStands}
+      />
       <GlideWith view={view}>
         <PlanWords list={words} view={view} theme={theme} />
         <PieceButtons plane={plane} view={view} />

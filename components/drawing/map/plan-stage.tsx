@@ -1,7 +1,7 @@
 'use client';
 
 import type Konva from 'konva';
-import { useLayoutEffect, useRef } from 'react';
+import { useEffect, useLayoutEffect, useRef } from 'react';
 import { Layer, Shape, Stage } from 'react-konva/lib/ReactKonvaCore.js';
 import { paint, THEMES, type DisplayList, type ThemeName } from '@/lib/draw';
 import { useView, useViewStore } from './view-store';
@@ -14,12 +14,15 @@ type Painted = { readonly list: DisplayList; readonly theme: ThemeName };
  * A pan repaints all of them at once within Leaflet's own event: going through React would show
  * the plan a frame behind the tiles.
  */
-export function PlanStage({
+export default function PlanStage({
   ground,
   plan,
   hand,
   theme,
+  onStands,
 }: {
+  /** Called once the canvas has been painted. */
+  onStands: () => void;
   ground: DisplayList;
   plan: DisplayList;
   hand: DisplayList;
@@ -27,6 +30,7 @@ export function PlanStage({
 }) {
   const width = useView((state) => state.atRest?.size.x ?? 0);
   const height = useView((state) => state.atRest?.size.y ?? 0);
+  useEffect(onStands, [onStands]);
   if (width === 0 || height === 0) return null;
   return (
     <Stage width={width} height={height} listening={false} className="pointer-events-none">

@@ -1,16 +1,13 @@
 'use client';
 
-import { ChecksPanel } from '@/components/checks/checks-panel';
-import { ConditionsPanel } from '@/components/conditions';
 import { KitShelf } from '@/components/kit';
-import { FloatingTag } from '../tag/floating-tag';
+import { FloatingTag, Strip } from './after-plan';
 import { Complaint } from './complaint';
 import { IndexTabs } from './index-tabs';
 import { More } from './more';
 import { PiecesSheet } from './pieces-sheet';
 import { PlanFrame } from './plan-frame';
 import { SaveLine } from './save-line';
-import { ScaledTitleBlock } from './scaled-title-block';
 
 /** The sheet on a desk: plan in its ruled frame, strip at the right, kit in the bottom margin. */
 export function DeskSheet() {
@@ -38,11 +35,7 @@ export function DeskSheet() {
             aria-label="Conditions, checks and title"
             className="flex min-h-0 flex-col overflow-y-auto border-l-2 border-ink"
           >
-            <ConditionsPanel />
-            <div className="flex min-h-60 shrink grow basis-60 flex-col border-t border-ink">
-              <ChecksPanel />
-            </div>
-            <ScaledTitleBlock />
+            <Strip />
           </aside>
         </div>
       </div>

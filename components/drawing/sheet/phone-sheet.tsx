@@ -1,29 +1,19 @@
 'use client';
 
-import dynamic from 'next/dynamic';
 import { useState } from 'react';
 import { FIELD_CAUTION_WORDS } from '@/components/ui/caution';
-import { CheckStepper, ChecksPanel } from '@/components/checks';
-import { ConditionsPanel, WindChip } from '@/components/conditions';
-import { KitShelf } from '@/components/kit';
+import { WindChip } from '@/components/conditions/wind-chip';
 import { undoLabel } from '@/lib/edits';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
 import { useScreen } from '../screen-store';
-import { StakeTag } from '../tag/stake-tag';
+import { PhonePanel } from './after-plan';
 import { Complaint } from './complaint';
-import { IndexTabs } from './index-tabs';
 import { More } from './more';
 import { PlanFrame } from './plan-frame';
 import { SaveWords } from './save-line';
-import { ScaledTitleBlock } from './scaled-title-block';
-
-const PiecesTable = dynamic(() => import('@/components/pieces').then((m) => m.PiecesTable), {
-  ssr: false,
-  loading: () => <p>Listing the pieces …</p>,
-});
 
 const PANELS = ['Checks', 'Place', 'Wind', 'Pieces', 'Title'] as const;
-type Panel = (typeof PANELS)[number];
+export type Panel = (typeof PANELS)[number];
 
 /** The sheet on a phone: plan on top, one panel below it, one thing at a time. */
 export function PhoneSheet() {
@@ -83,50 +73,10 @@ export function PhoneSheet() {
           ))}
         </div>
         <div className="min-h-0 grow overflow-y-auto overscroll-contain">
-          {shownPiece !== null ? (
-            <div className="space-y-3 px-3 py-2">
-              <StakeTag key={shownPiece} id={shownPiece} roomy />
-              <CheckStepper pieceId={shownPiece} />
-            </div>
-          ) : (
-            <PanelOf panel={panel} />
-          )}
+          <PhonePanel panel={panel} piece={shownPiece} />
           <p className="px-3 pb-2 pt-1 text-sm font-semibold text-alarm">{FIELD_CAUTION_WORDS}</p>
         </div>
       </div>
     </div>
   );
-}
-
-function PanelOf({ panel }: { panel: Panel }) {
-  switch (panel) {
-    case 'Checks':
-      return (
-        <>
-          <div className="border-b border-ink px-3 py-2">
-            <CheckStepper />
-          </div>
-          <ChecksPanel />
-        </>
-      );
-    case 'Place':
-      return <KitShelf />;
-    case 'Wind':
-      return <ConditionsPanel />;
-    case 'Pieces':
-      return (
-        <div id="pieces" className="px-3 py-2">
-          <PiecesTable />
-        </div>
-      );
-    case 'Title':
-      return (
-        <>
-          <ScaledTitleBlock />
-          <div className="px-3 py-2">
-            <IndexTabs />
-          </div>
-        </>
-      );
-  }
 }

@@ -1,12 +1,6 @@
 'use client';
 
-import dynamic from 'next/dynamic';
-
-// Below the plan and not needed to draw: its code may come after the plan answers.
-const PiecesTable = dynamic(() => import('@/components/pieces').then((m) => m.PiecesTable), {
-  ssr: false,
-  loading: () => <p>Listing the pieces …</p>,
-});
+import { PiecesTable } from './after-plan';
 
 /** The second sheet: every piece in a table, the plan's twin. */
 export function PiecesSheet() {

@@ -1,16 +1,13 @@
 'use client';
 
-import { ChecksPanel } from '@/components/checks/checks-panel';
-import { ConditionsPanel } from '@/components/conditions';
 import { KitShelf } from '@/components/kit';
-import { FloatingTag } from '../tag/floating-tag';
+import { FloatingTag, StripBelow } from './after-plan';
 import { Complaint } from './complaint';
 import { IndexTabs } from './index-tabs';
 import { More } from './more';
 import { PiecesSheet } from './pieces-sheet';
 import { PlanFrame } from './plan-frame';
 import { SaveLine } from './save-line';
-import { ScaledTitleBlock } from './scaled-title-block';
 
 /** The sheet on a tablet held upright: the strip lies below the plan, in two columns. */
 export function TabletSheet() {
@@ -38,11 +35,7 @@ export function TabletSheet() {
             aria-label="Conditions, checks and title"
             className="grid grid-cols-[minmax(0,1fr)_minmax(0,1fr)] border-t-2 border-ink"
           >
-            <div className="border-r border-ink">
-              <ConditionsPanel />
-              <ScaledTitleBlock />
-            </div>
-            <ChecksPanel />
+            <StripBelow />
           </aside>
         </div>
       </div>

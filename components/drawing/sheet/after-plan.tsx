@@ -1,0 +1,35 @@
+'use client';
+
+import dynamic from 'next/dynamic';
+import type { ComponentType } from 'react';
+import { useView } from '../map/view-store';
+
+/**
+ * Loads a part of the sheet once the plan answers: a hand that comes in a hurry gets the plan
+ * first. Its place on the sheet is kept meanwhile, so that nothing moves when it comes.
+ */
+function afterPlan<Props extends object>(
+  load: () => Promise<ComponentType<Props>>,
+): ComponentType<Props> {
+  const Part = dynamic<Props>(load, { ssr: false, loading: Coming });
+  return function AfterPlan(props: Props) {
+    const answers = useView((state) => state.view !== null);
+    return answers ? <Part {...props} /> : <Coming />;
+  };
+}
+
+const Coming = () => (
+  <p role="status" className="px-4 py-3 text-ink-soft">
+    Coming after the plan …
+  </p>
+);
+
+export const Strip = afterPlan(() => import('./strip').then((m) => m.Strip));
+export const StripBelow = afterPlan(() => import('./strip').then((m) => m.StripBelow));
+export const PhonePanel = afterPlan(() => import('./phone-panel').then((m) => m.PhonePanel));
+export const PiecesTable = afterPlan(() =>
+  import('@/components/pieces').then((m) => m.PiecesTable),
+);
+export const FloatingTag = afterPlan(() =>
+  import('../tag/floating-tag').then((m) => m.FloatingTag),
+);

@@ -16,12 +16,21 @@ const DOT_COST = 45;
 const BOX_COST = 1.5;
 const OFF_SHEET_COST = 1e5;
 
-/** What already lies on the sheet, asked what a word would cover. */
-export class Clutter {
-  private readonly boxes: Box[] = [];
-  private readonly dots = new Map<number, number[]>();
+type Cell = { readonly boxes: Box[]; readonly dots: number[] };
 
-  constructor(private readonly frame: Frame) {}
+/** What already lies on the sheet, asked what a word would cover. Kept by cells of the sheet. */
+export class Clutter {
+  private readonly cells = new Map<number, Cell>();
+  private readonly seen: Box | null;
+
+  constructor(private readonly frame: Frame) {
+    const { bounds } = frame.view;
+    const [low, high] = bounds ? [this.toPx(bounds.min), this.toPx(bounds.max)] : [];
+    this.seen =
+      low && high
+        ? { x: low.x + 4, y: high.y + 4, w: high.x - low.x - 8, h: low.y - high.y - 8 }
+        : null;
+  }
 
   toPx({ x, y }: Vec): Vec {
     const { metresPerPx } = this.frame.view;
@@ -29,7 +38,7 @@ export class Clutter {
   }
 
   addBox(box: Box): void {
-    this.boxes.push(box);
+    this.visit(box, (key) => this.cellAt(key).boxes.push(box));
   }
 
   /** A square of `size` px round a place. */
@@ -52,62 +61,62 @@ export class Clutter {
       const [a, b] = [this.toPx(path[i - 1]!), this.toPx(path[i]!)];
       const steps = Math.min(400, Math.ceil(Math.hypot(b.x - a.x, b.y - a.y) / DOT_EVERY_PX));
       for (let step = 0; step < steps; step++) {
-        const t = step / steps;
-        this.addDot(a.x + (b.x - a.x) * t, a.y + (b.y - a.y) * t);
+        const x = a.x + ((b.x - a.x) * step) / steps;
+        const y = a.y + ((b.y - a.y) * step) / steps;
+        const key = cellKey(Math.floor(x / CELL_PX), Math.floor(y / CELL_PX));
+        this.cellAt(key).dots.push(x, y);
       }
     }
-  }
-
-  private addDot(x: number, y: number): void {
-    const key = cellKey(Math.floor(x / CELL_PX), Math.floor(y / CELL_PX));
-    const cell = this.dots.get(key);
-    if (cell) cell.push(x, y);
-    else this.dots.set(key, [x, y]);
   }
 
   cost(box: Box): number {
-    return this.coverCost(box) + this.lineCost(box) + this.offSheetCost(box);
+    const { seen } = this;
+    const off =
+      seen &&
+      (box.x < seen.x ||
+        box.y < seen.y ||
+        box.x + box.w > seen.x + seen.w ||
+        box.y + box.h > seen.y + seen.h);
+    let cost = off ? OFF_SHEET_COST : 0;
+    this.visit(box, (key, x, y) => {
+      const cell = this.cells.get(key);
+      if (cell) cost += costInCell(cell, box, x, y);
+    });
+    return cost;
   }
 
-  private coverCost(box: Box): number {
-    let area = 0;
-    for (const other of this.boxes) {
-      const w = Math.min(box.x + box.w, other.x + other.w) - Math.max(box.x, other.x);
-      if (w <= 0) continue;
-      const h = Math.min(box.y + box.h, other.y + other.h) - Math.max(box.y, other.y);
-      if (h > 0) area += w * h;
-    }
-    return area * BOX_COST;
+  private cellAt(key: number): Cell {
+    let cell = this.cells.get(key);
+    if (!cell) this.cells.set(key, (cell = { boxes: [], dots: [] }));
+    return cell;
   }
 
-  private lineCost(box: Box): number {
-    let found = 0;
-    const [left, right] = [Math.floor(box.x / CELL_PX), Math.floor((box.x + box.w) / CELL_PX)];
-    const [top, foot] = [Math.floor(box.y / CELL_PX), Math.floor((box.y + box.h) / CELL_PX)];
+  private visit({ x, y, w, h }: Box, use: (key: number, x: number, y: number) => void): void {
+    const [left, right] = [Math.floor(x / CELL_PX), Math.floor((x + w) / CELL_PX)];
+    const [top, foot] = [Math.floor(y / CELL_PX), Math.floor((y + h) / CELL_PX)];
     for (let cx = left; cx <= right; cx++) {
-      for (let cy = top; cy <= foot; cy++) {
-        const cell = this.dots.get(cellKey(cx, cy));
-        if (!cell) continue;
-        for (let i = 0; i < cell.length; i += 2) {
-          const [x, y] = [cell[i]!, cell[i + 1]!];
-          if (x >= box.x && x <= box.x + box.w && y >= box.y && y <= box.y + box.h) found++;
-        }
-      }
+      for (let cy = top; cy <= foot; cy++) use(cellKey(cx, cy), cx * CELL_PX, cy * CELL_PX);
     }
-    return found * DOT_COST;
   }
+}
 
-  private offSheetCost(box: Box): number {
-    const { bounds } = this.frame.view;
-    if (!bounds) return 0;
-    const [low, high] = [this.toPx(bounds.min), this.toPx(bounds.max)];
-    const inside =
-      box.x >= low.x + 4 &&
-      box.x + box.w <= high.x - 4 &&
-      box.y >= high.y + 4 &&
-      box.y + box.h <= low.y - 4;
-    return inside ? 0 : OFF_SHEET_COST;
+/** Only what lies in this cell is counted, so that a box in several cells counts once in all. */
+function costInCell({ boxes, dots }: Cell, box: Box, x: number, y: number): number {
+  const [left, right] = [Math.max(box.x, x), Math.min(box.x + box.w, x + CELL_PX)];
+  const [top, foot] = [Math.max(box.y, y), Math.min(box.y + box.h, y + CELL_PX)];
+  let area = 0;
+  for (const other of boxes) {
+    const w = Math.min(right, other.x + other.w) - Math.max(left, other.x);
+    if (w <= 0) continue;
+    const h = Math.min(foot, other.y + other.h) - Math.max(top, other.y);
+    if (h > 0) area += w * h;
   }
+  let found = 0;
+  for (let i = 0; i < dots.length; i += 2) {
+    const [dx, dy] = [dots[i]!, dots[i + 1]!];
+    if (dx >= left && dx <= right && dy >= top && dy <= foot) found++;
+  }
+  return area * BOX_COST + found * DOT_COST;
 }
 
 export function turnedBoxes(centre: Vec, width: number, height: number, turnDeg: number): Box[] {

@@ -55,10 +55,14 @@ export function dimensionMarks(frame: Frame, dimension: Dimension, clutter: Clut
   const wide = textWidth(text, drawn.size, drawn.bold) + 10;
   const turnDeg = readableTurn(direction);
   const ways = waysOf(dimension, apart(ends) / frame.view.metresPerPx, wide, drawn.size);
+  const mayGo = dimension.weight === 'plain' && dimension.asidePx === null;
   const best = leastCost(ways, RANK_COST, (way) => {
     const at = valuePlace(frame, ends, direction, way);
     const boxes = turnedBoxes(clutter.toPx(at), wide, drawn.size + 4, turnDeg);
-    return { way, at, cost: sum(boxes.map((box) => clutter.cost(box))) };
+    const cost = sum(boxes.map((box) => clutter.cost(box)));
+    // Distances that may be left out are also kept from lying along a zone's edge.
+    const along = mayGo ? lineCost(frame, ends, direction, way, clutter) : 0;
+    return { way, at, cost: cost + along };
   });
   if (dimension.weight === 'plain' && best.cost > HIDES_TOO_MUCH) return [];
   clutter.addTurned(clutter.toPx(best.at), wide, drawn.size, turnDeg);
@@ -68,6 +72,16 @@ export function dimensionMarks(frame: Frame, dimension: Dimension, clutter: Clut
   ];
 }
 
+/** What the dimension line itself lies along or crosses, where it stands aside. */
+function lineCost(frame: Frame, ends: Ends, direction: Vec, way: Way, clutter: Clutter): number {
+  if (way.asidePx === 0) return 0;
+  const middle = valuePlace(frame, ends, direction, { ...way, part: 0.5, outPx: 0 });
+  const longPx = apart(ends) / frame.view.metresPerPx;
+  const boxes = turnedBoxes(clutter.toPx(middle), longPx, LINE_BERTH_PX, readableTurn(direction));
+  return sum(boxes.map((box) => clutter.cost(box))) / 2;
+}
+
+const LINE_BERTH_PX = 10;
 const RANK_COST = 5;
 /** About a quarter of a symbol, or a line or two, under the value. */
 const HIDES_TOO_MUCH = 420;

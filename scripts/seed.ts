@@ -23,7 +23,7 @@ async function layIn(say: (words: string) => void): Promise<void> {
   const signIns = makeSignIns();
   await inTransaction(async (transaction) => {
     const planner = await seedAgency(signIns, transaction);
-    await seedPlaces(planner, transaction);
+    await seedPlaces(planner, transaction, new Date());
     // Before the commit: an agency whose passwords nobody knows could never be entered.
     await keepSignIns(folder, signIns);
   });

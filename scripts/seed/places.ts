@@ -9,9 +9,12 @@ import { insertSite } from '../../lib/server/sites/create-site';
 import { saveGroundIn } from '../../lib/server/sites/save-ground';
 import type { Author } from './agency';
 
-/** The demo's sites with their ground, and the layouts drawn there. */
-export async function seedPlaces(author: Author, transaction: Transaction): Promise<void> {
-  const now = new Date();
+/** The demo's sites with their ground, and the layouts drawn there, as if drawn at `now`. */
+export async function seedPlaces(
+  author: Author,
+  transaction: Transaction,
+  now: Date,
+): Promise<void> {
   const ids = new Map<string, string>();
   for (const { key, name, place, county, notes, ground, scene } of DEMO_SITES) {
     const entered = { name, where: `${place}, ${county}`, notes, at: scene.origin };

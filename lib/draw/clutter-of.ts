@@ -1,7 +1,9 @@
+import type { Vec } from '../geo';
 import { Clutter } from './clutter';
 import type { Frame } from './frame';
+import { boundsOf } from './paper';
 import { textWidth } from './text-width';
-import type { Group, Mark } from './types';
+import type { Group, Hit, Mark } from './types';
 
 /**
  * What words must keep off: symbols, outlines and lines of `groups`, and words of the ground
@@ -23,11 +25,32 @@ export function clutterOf(
       if (layer === 'zone' && mark.type === 'path') mark.lines.forEach((l) => clutter.addPath(l));
     }
   }
+  const near = nearTo(frame, groups);
   for (const { hit, marks } of ground) {
-    if (hit?.type === 'spot') clutter.addSpot(hit.at, hit.radiusPx);
-    for (const mark of marks) addWords(clutter, mark);
+    if (hit?.type === 'spot' && near(hit.at)) clutter.addSpot(hit.at, hit.radiusPx);
+    for (const mark of marks) if (mark.type === 'text' && near(mark.at)) addWords(clutter, mark);
   }
   return clutter;
+}
+
+/** Labels never stand farther from the layout's pieces than this. */
+const NEAR_PX = 260;
+
+/** Whether a place lies close enough to the layout to matter; a site may have thousands of words. */
+function nearTo(frame: Frame, groups: readonly Group[]): (place: Vec) => boolean {
+  const bounds = boundsOf(groups.flatMap(({ hit }) => (hit ? placesOf(hit) : [])));
+  const reach = frame.metres(NEAR_PX);
+  return ({ x, y }) =>
+    bounds !== null &&
+    x > bounds.min.x - reach &&
+    x < bounds.max.x + reach &&
+    y > bounds.min.y - reach &&
+    y < bounds.max.y + reach;
+}
+
+function placesOf(hit: Hit): readonly Vec[] {
+  if (hit.type === 'spot') return [hit.at];
+  return (hit.type === 'lines' ? hit.lines : hit.rings).flat();
 }
 
 export function addWords(clutter: Clutter, mark: Mark): void {

@@ -72,7 +72,7 @@ function AnswerEntry({
     <span className="flex flex-wrap gap-2">
       <Select
         aria-label={`${CLASS_WORDS[name]}: owner’s answer`}
-        className="max-w-40"
+        className="!w-36"
         value={given?.answer ?? ''}
         onChange={(event) => {
           const answer = ANSWERS.find((candidate) => candidate === event.target.value);
@@ -87,7 +87,7 @@ function AnswerEntry({
       {given && (
         <Input
           aria-label={`${CLASS_WORDS[name]}: answered at`}
-          className="max-w-56"
+          className="!w-56"
           type="datetime-local"
           value={toLocalEntry(given.at)}
           onChange={(event) => put({ ...given, at: fromLocalEntry(event.target.value) })}

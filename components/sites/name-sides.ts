@@ -1,23 +1,46 @@
-type Spot = { readonly x: number; readonly y: number };
-export type Side = 'left' | 'right';
+/** A mark, px from the map's upper left corner, and the size of its name. */
+export type Named = {
+  readonly x: number;
+  readonly y: number;
+  readonly width: number;
+  readonly height: number;
+};
+export type Side = 'right' | 'left' | 'right-low' | 'right-high';
 
-/** Height of a name and the length that most stay within, px. */
-const NAME = { height: 24, length: 200 } as const;
+type Box = { left: number; right: number; top: number; bottom: number };
+
+/** How far a low or a high name is moved from its mark's level, px; the style sheet moves it. */
+const MOVED = 24;
+const SIDES: readonly Side[] = ['right', 'left', 'right-low', 'right-high'];
 
 /**
- * On which side of its mark each name stands: right, unless it would run into the name of a mark
- * that lies above it or level with it.
+ * On which side of its mark each name stands: the first side on which it neither runs into a name
+ * already placed nor off the map. Where no side is free it stays on the right.
  */
-export function nameSides(spots: readonly Spot[]): Side[] {
-  const sides = spots.map((): Side => 'right');
-  const order = spots.map((_, i) => i).sort((a, b) => spots[a]!.y - spots[b]!.y || a - b);
-  order.forEach((i, place) => {
-    const clash = order.slice(0, place).some((j) => {
-      const [mine, other] = [spots[i]!, spots[j]!];
-      const near = Math.abs(mine.y - other.y) < NAME.height;
-      return near && sides[j] === 'right' && Math.abs(mine.x - other.x) < NAME.length;
-    });
-    if (clash) sides[i] = 'left';
+export function nameSides(marks: readonly Named[], mapWidth: number): Side[] {
+  const placed: Box[] = [];
+  return marks.map((mark) => {
+    const side =
+      SIDES.find((candidate) => {
+        const box = boxOf(mark, candidate);
+        const inside = box.left >= 0 && box.right <= mapWidth;
+        return inside && !placed.some((other) => overlap(box, other));
+      }) ?? 'right';
+    placed.push(boxOf(mark, side));
+    return side;
   });
-  return sides;
 }
+
+function boxOf({ x, y, width, height }: Named, side: Side): Box {
+  const moved = side === 'right-low' ? MOVED : side === 'right-high' ? -MOVED : 0;
+  const left = side === 'left' ? x - width : x;
+  return {
+    left,
+    right: left + width,
+    top: y + moved - height / 2,
+    bottom: y + moved + height / 2,
+  };
+}
+
+const overlap = (a: Box, b: Box): boolean =>
+  a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom;

@@ -3,10 +3,12 @@
 import 'leaflet/dist/leaflet.css';
 import '@/components/map-paper/map-paper.css';
 import '@/components/drawing/map/plan-map.css';
+import type { LatLngBoundsExpression } from 'leaflet';
 import { useMemo } from 'react';
 import { AttributionControl, MapContainer, ScaleControl, ZoomControl } from 'react-leaflet';
 import { BaseMapTiles } from '@/components/map-paper/base-map-tiles';
 import { Graticule } from '@/components/map-paper/graticule';
+import { useFitted } from '@/components/map-paper/use-fitted';
 import type { SiteAnswer } from '@/lib/api';
 import type { LonLat } from '@/lib/geo';
 import { GroundOver } from './ground-over';
@@ -19,6 +21,7 @@ const ZOOM_WITHOUT_MAP = 17;
 export function SitePreview({ site }: { site: SiteAnswer }) {
   const map = site.base_map;
   const origin = useMemo(() => site.at ?? (map && middle(map.bounds)), [site.at, map]);
+  const bounds = useMemo(() => map && corners(map.bounds), [map]);
   if (!origin) {
     return (
       <p className="border border-rule p-4">
@@ -26,13 +29,12 @@ export function SitePreview({ site }: { site: SiteAnswer }) {
       </p>
     );
   }
-  const bounds = map && corners(map.bounds);
   return (
     <section aria-label="Map of the site" className="min-w-0">
       <MapContainer
-        {...(bounds
-          ? { bounds, maxBounds: bounds }
-          : { center: [origin[1], origin[0]], zoom: ZOOM_WITHOUT_MAP })}
+        center={[origin[1], origin[0]]}
+        zoom={ZOOM_WITHOUT_MAP}
+        maxBounds={bounds ?? undefined}
         maxZoom={CLOSEST_ZOOM}
         zoomSnap={0.25}
         attributionControl={false}
@@ -41,6 +43,7 @@ export function SitePreview({ site }: { site: SiteAnswer }) {
         className="map-paper plan-map h-80 border border-ink lg:h-[28rem]"
       >
         {map ? <BaseMapTiles map={map} deepestZoom={CLOSEST_ZOOM} /> : <Graticule />}
+        <Fitted bounds={bounds} />
         <GroundOver siteId={site.id} origin={origin} />
         <AttributionControl prefix={false} position="bottomleft" />
         <ZoomControl position="topright" />
@@ -48,6 +51,11 @@ export function SitePreview({ site }: { site: SiteAnswer }) {
       </MapContainer>
     </section>
   );
+}
+
+function Fitted({ bounds }: { bounds: LatLngBoundsExpression | null }) {
+  useFitted(bounds);
+  return null;
 }
 
 type Bounds = NonNullable<SiteAnswer['base_map']>['bounds'];

@@ -7,6 +7,7 @@ import { useRouter } from 'next/navigation';
 import { useEffect, useMemo } from 'react';
 import { MapContainer, ScaleControl, useMap, ZoomControl } from 'react-leaflet';
 import { Graticule } from '@/components/map-paper/graticule';
+import { useFitted } from '@/components/map-paper/use-fitted';
 import type { SiteRow } from '@/lib/api';
 import { nameSides } from './name-sides';
 
@@ -16,6 +17,12 @@ type Placed = SiteRow & { at: NonNullable<SiteRow['at']> };
 const CLOSEST_ZOOM = 11;
 /** Names stand to the right of their marks; px. */
 const ROOM_FOR_NAMES = { left: 72, right: 190, above: 48, below: 48 } as const;
+
+const FIT: L.FitBoundsOptions = {
+  paddingTopLeft: [ROOM_FOR_NAMES.left, ROOM_FOR_NAMES.above],
+  paddingBottomRight: [ROOM_FOR_NAMES.right, ROOM_FOR_NAMES.below],
+  maxZoom: CLOSEST_ZOOM,
+};
 
 /** Where the listed sites lie, on plain paper: no tiles are fetched from anywhere. */
 export function SitesMap({ sites }: { sites: readonly SiteRow[] }) {
@@ -50,6 +57,11 @@ export function SitesMap({ sites }: { sites: readonly SiteRow[] }) {
 function SiteButtons({ sites }: { sites: readonly Placed[] }) {
   const map = useMap();
   const router = useRouter();
+  const bounds = useMemo(
+    () => (sites.length > 0 ? L.latLngBounds(sites.map(({ at }) => [at[1], at[0]])) : null),
+    [sites],
+  );
+  useFitted(bounds, FIT);
   useEffect(() => {
     const layer = L.layerGroup().addTo(map);
     const marks = sites.map((site) => {
@@ -61,23 +73,20 @@ function SiteButtons({ sites }: { sites: readonly Placed[] }) {
       return { at, button: html };
     });
     const sideNames = () => {
-      const spots = marks.map(({ at }) => map.latLngToContainerPoint(at));
-      nameSides(spots).forEach((side, i) => {
-        marks[i]?.button.classList.toggle('name-left', side === 'left');
+      const named = marks.map(({ at, button }) => {
+        const { x, y } = map.latLngToContainerPoint(at);
+        const height = button.firstElementChild?.clientHeight ?? 0;
+        return { x, y, width: button.offsetWidth, height };
+      });
+      nameSides(named, map.getSize().x).forEach((side, i) => {
+        const button = marks[i]?.button;
+        if (button) button.dataset.side = side;
       });
     };
-    if (sites.length > 0) {
-      map.fitBounds(L.latLngBounds(marks.map(({ at }) => at)), {
-        paddingTopLeft: [ROOM_FOR_NAMES.left, ROOM_FOR_NAMES.above],
-        paddingBottomRight: [ROOM_FOR_NAMES.right, ROOM_FOR_NAMES.below],
-        maxZoom: CLOSEST_ZOOM,
-        animate: false,
-      });
-    }
     sideNames();
-    map.on('zoomend', sideNames);
+    map.on('zoomend moveend', sideNames);
     return () => {
-      map.off('zoomend', sideNames);
+      map.off('zoomend moveend', sideNames);
       layer.remove();
     };
   }, [map, router, sites]);
@@ -88,7 +97,7 @@ function SiteButtons({ sites }: { sites: readonly Placed[] }) {
 function siteButton(name: string, open: () => void): HTMLButtonElement {
   const button = document.createElement('button');
   button.type = 'button';
-  button.textContent = name;
+  button.append(Object.assign(document.createElement('span'), { textContent: name }));
   button.addEventListener('click', open);
   L.DomEvent.disableClickPropagation(button);
   return button;

@@ -172,6 +172,7 @@ export function StartLayout({ site }: { site: SiteAnswer }) {
         {problem && (
           <Problems
             problem={problem}
+            pathsWithin="from.file"
             title={problem.faults.length > 0 ? faultsTitle(problem.faults.length) : undefined}
           />
         )}

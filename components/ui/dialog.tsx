@@ -23,7 +23,7 @@ export function Dialog({
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
-        <Radix.Overlay className="bg-ink/40 fixed inset-0 z-[2000]" />
+        <Radix.Overlay className="fixed inset-0 z-[2000] bg-black/50" />
         <Radix.Content
           aria-describedby={description ? undefined : ''}
           className="fixed left-1/2 top-1/2 z-[2001] max-h-[94dvh] w-[min(94vw,40rem)] -translate-x-1/2 -translate-y-1/2 overflow-y-auto border-2 border-ink bg-paper p-6"

@@ -27,22 +27,29 @@ describe('lines of the paper', () => {
 });
 
 describe('names beside their marks', () => {
-  test('a name that would run into another stands on the left', () => {
-    const [apart, low] = [
-      { x: 10, y: 10 },
-      { x: 40, y: 22 },
-    ];
-    expect(nameSides([apart, low])).toEqual(['right', 'left']);
-    expect(nameSides([low, apart])).toEqual(['left', 'right']);
+  const named = (x: number, y: number) => ({ x, y, width: 120, height: 22 });
+
+  test('far apart they stand on the right', () => {
+    expect(nameSides([named(10, 10), named(40, 60), named(400, 10)], 600)).toEqual([
+      'right',
+      'right',
+      'right',
+    ]);
   });
 
-  test('names far apart stand on the right', () => {
-    expect(
-      nameSides([
-        { x: 10, y: 10 },
-        { x: 40, y: 60 },
-        { x: 400, y: 10 },
-      ]),
-    ).toEqual(['right', 'right', 'right']);
+  test('a name that would run into another stands on the left', () => {
+    expect(nameSides([named(200, 10), named(195, 22)], 600)).toEqual(['right', 'left']);
+  });
+
+  test('with no room on the left it stands a line lower, then a line higher', () => {
+    expect(nameSides([named(10, 50), named(40, 50), named(50, 52)], 600)).toEqual([
+      'right',
+      'right-low',
+      'right-high',
+    ]);
+  });
+
+  test('at the map’s right edge it stands on the left', () => {
+    expect(nameSides([named(560, 50)], 600)).toEqual(['left']);
   });
 });

@@ -1,10 +1,11 @@
-import { meanOf, type Vec } from '../geo';
+import type { Vec } from '../geo';
 import { footprintOf, type Piece } from '../layout';
 import type { Clutter } from './clutter';
 import type { Frame } from './frame';
 import { placeLabels, type Wanted } from './label-places';
 import { sheetName } from './names';
 import { ROD_RADIUS_PX, Y_RADIUS_PX, Z_RADIUS_PX } from './points';
+import { boundsOf } from './paper';
 import type { Group } from './types';
 import { PUMP_RADIUS_PX } from './units';
 
@@ -66,6 +67,8 @@ const RADIUS_PX: Partial<Record<Piece['kind'], number>> = {
   note: 8,
 };
 
+const POOL_HOLDS_WORD_PX = 22;
+
 type Seat = Pick<Wanted, 'at' | 'reach' | 'token' | 'ring'>;
 
 /** Where the label's piece lies and how far its symbol reaches from there. */
@@ -75,13 +78,18 @@ function seatOf(frame: Frame, piece: Piece): Seat | null {
     return { at: frame.vec(piece.at), reach: 0, token, ring: footprintOf(frame.plane, piece) };
   }
   if (piece.kind === 'pool') {
-    const at = meanOf((piece.rings[0] ?? []).slice(1).map(frame.vec));
-    return at && { at, reach: -8, token, ring: null };
+    const bounds = boundsOf((piece.rings[0] ?? []).map(frame.vec));
+    if (!bounds) return null;
+    const { min, max } = bounds;
+    const half = Math.min(max.x - min.x, max.y - min.y) / 2 / frame.view.metresPerPx;
+    // A pool large enough has its word inside, a small one beside it.
+    const reach = half > POOL_HOLDS_WORD_PX ? -8 : half;
+    return { at: { x: (min.x + max.x) / 2, y: (min.y + max.y) / 2 }, reach, token, ring: null };
   }
   const reach = RADIUS_PX[piece.kind];
   return reach === undefined || !('at' in piece)
     ? null
-    : { at: frame.vec(piece.at), reach, token, ring: null };
+    : { at: frame.vec(piece.at), reach: reach * frame.symbols, token, ring: null };
 }
 
 /** Notes are written out in the tables; on the plan they must not bury it. */

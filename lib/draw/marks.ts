@@ -45,6 +45,18 @@ export const pxDisc = (
   at: Px = { x: 0, y: 0 },
 ): PxShape => ({ type: 'disc', at, radius, stroke: drawn, fill: filled });
 
+/** The shapes `part` as large, strokes as wide as before. */
+export const scaled = (shapes: readonly PxShape[], part: number): readonly PxShape[] =>
+  part === 1
+    ? shapes
+    : shapes.map((shape) =>
+        shape.type === 'disc'
+          ? { ...shape, radius: shape.radius * part, at: scaledPx(shape.at, part) }
+          : { ...shape, points: shape.points.map((point) => scaledPx(point, part)) },
+      );
+
+const scaledPx = ({ x, y }: Px, part: number): Px => ({ x: x * part, y: y * part });
+
 export const words = (
   at: Vec,
   text: string,

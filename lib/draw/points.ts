@@ -1,6 +1,6 @@
 import { placesOf, type PieceOf, type Probe, type Rod } from '../layout';
 import type { Frame } from './frame';
-import { fill, glyph, line, pxDisc, pxLine, stroke } from './marks';
+import { fill, glyph, line, pxDisc, pxLine, scaled, stroke } from './marks';
 import type { Group, PxShape } from './types';
 
 /** Pieces that stand on a spot: fixed symbols, whatever the scale. */
@@ -185,8 +185,8 @@ const spot = (
   return {
     id: piece.id,
     layer: 'piece',
-    hit: { type: 'spot', at, radiusPx: Math.max(radius, FINGER_PX) },
-    marks: [glyph(at, shapes)],
+    hit: { type: 'spot', at, radiusPx: Math.max(radius, FINGER_PX) * frame.symbols },
+    marks: [glyph(at, scaled(shapes, frame.symbols))],
   };
 };
 

@@ -25,7 +25,9 @@ export function drawStatuses(
   return groups.flatMap((group): Group[] => {
     const status = worst.get(group.id);
     if (!status || !group.hit) return [];
-    return [{ id: group.id, layer: 'dimension', marks: statusMarks(group.hit, status, clutter) }];
+    return [
+      { id: group.id, layer: 'dimension', marks: statusMarks(frame, group.hit, status, clutter) },
+    ];
   });
 }
 
@@ -71,7 +73,7 @@ function pieceIdOf({ layout }: Sheet, rule: string, subject: string): string | n
 const FRAME_GAP_PX = 4;
 const BADGE_PX = 8;
 
-function statusMarks(hit: Hit, status: Told, clutter: Clutter): Mark[] {
+function statusMarks(frame: Frame, hit: Hit, status: Told, clutter: Clutter): Mark[] {
   if (hit.type === 'spot' && status === 'not-met') {
     const half = hit.radiusPx + FRAME_GAP_PX;
     clutter.addSpot(hit.at, half);
@@ -83,13 +85,14 @@ function statusMarks(hit: Hit, status: Told, clutter: Clutter): Mark[] {
   }
   const { at, offset } = badgePlace(hit);
   const px = clutter.toPx(at);
+  const size = BADGE_PX * frame.symbols;
   clutter.addBox({
-    x: px.x + offset - BADGE_PX,
-    y: px.y - offset - BADGE_PX,
-    w: BADGE_PX * 2,
-    h: BADGE_PX * 2,
+    x: px.x + offset - size,
+    y: px.y - offset - size,
+    w: size * 2,
+    h: size * 2,
   });
-  return badge(at, { x: offset, y: -offset }, status);
+  return badge(at, { x: offset, y: -offset }, status, frame.symbols);
 }
 
 function badgePlace(hit: Hit): { at: Vec; offset: number } {
@@ -112,9 +115,9 @@ const square = (half: number): (readonly [number, number])[] => [
 ];
 
 /** The shape that stands for the status everywhere: square, reversed block with ?, triangle. */
-export function badge(at: Vec, offset: Px, status: Told): Mark[] {
+function badge(at: Vec, offset: Px, status: Told, size: number): Mark[] {
   const moved = (points: readonly (readonly [number, number])[]) =>
-    points.map(([x, y]): readonly [number, number] => [x + offset.x, y + offset.y]);
+    points.map(([x, y]): readonly [number, number] => [x * size + offset.x, y * size + offset.y]);
   const edge = stroke('paper', 2);
   if (status === 'caution') {
     const triangle = moved([

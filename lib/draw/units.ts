@@ -18,11 +18,11 @@ export function drawUnit(frame: Frame, unit: Unit): Group {
     layer: 'piece',
     hit:
       unit.kind === 'pump'
-        ? { type: 'spot', at: frame.vec(unit.at), radiusPx: PUMP_RADIUS_PX }
+        ? { type: 'spot', at: frame.vec(unit.at), radiusPx: PUMP_RADIUS_PX * frame.symbols }
         : { type: 'area', rings: [ring], nearPx: 6, edge: false },
     marks:
       unit.kind === 'pump'
-        ? pumpMarks(frame.vec(unit.at), ring, unit.heading_deg ?? 0)
+        ? pumpMarks(frame.vec(unit.at), ring, unit.heading_deg ?? 0, frame.symbols)
         : vehicleMarks(ring, unit.kind === 'casualty-vehicle'),
   };
 }
@@ -60,8 +60,8 @@ function vehicleMarks([fl, fr, rr, rl]: Ring, casualty: boolean): Mark[] {
 }
 
 /** After ISO 10628: a circle with a triangle that points where the liquid goes. */
-function pumpMarks(at: Vec, ring: Ring, headingDeg: number): Mark[] {
-  const r = PUMP_RADIUS_PX;
+function pumpMarks(at: Vec, ring: Ring, headingDeg: number, symbols: number): Mark[] {
+  const r = PUMP_RADIUS_PX * symbols;
   const [sin, cos] = [Math.sin(Math.PI / 3) * r, Math.cos(Math.PI / 3) * r];
   return [
     line([ring.slice(0, -1)], stroke('ink-soft', 1), true, fill('paper', 0.85)),

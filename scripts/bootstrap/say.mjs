@@ -6,9 +6,17 @@ const WORTH_TIMING_MS = 1_000;
 // When the terminal is closed, stopping cleanly matters more than telling about it.
 process.stdout.on('error', () => undefined);
 
+/** @type {NodeJS.WriteStream} */
+let stream = process.stdout;
+
+/** For commands whose standard output is read by machines. */
+export function progressOnStderr() {
+  stream = process.stderr;
+}
+
 /** @param {string} line */
 export function say(line) {
-  process.stdout.write(`${line}\n`);
+  stream.write(`${line}\n`);
 }
 
 /** @param {number} ms */

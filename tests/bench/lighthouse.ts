@@ -1,3 +1,5 @@
+import type { Result } from 'lighthouse';
+
 const KIB = 1024;
 
 export type Audit = {
@@ -9,6 +11,9 @@ export type Audit = {
   readonly scriptKib: number;
 };
 
+/** On a busy machine Lighthouse now and then loses a page's trace and asks to be run again. */
+const TRIES = 4;
+
 type Request = { readonly resourceType?: string; readonly transferSize?: number };
 
 /**
@@ -16,15 +21,7 @@ type Request = { readonly resourceType?: string; readonly transferSize?: number 
  * Throws if the page led elsewhere: a fast sign-in page says nothing of the page behind it.
  */
 export async function audit(address: string, port: number): Promise<Audit> {
-  const { default: lighthouse, desktopConfig } = await import('lighthouse');
-  const ran = await lighthouse(
-    address,
-    { port, output: 'json', logLevel: 'error', disableStorageReset: true },
-    desktopConfig,
-  );
-  if (!ran) throw new Error(`Lighthouse gave nothing for ${address}.`);
-  const { categories, audits, finalDisplayedUrl, runtimeError } = ran.lhr;
-  if (runtimeError) throw new Error(`${address}: ${runtimeError.message}`);
+  const { categories, audits, finalDisplayedUrl } = await measured(address, port);
   if (finalDisplayedUrl.replace(/\/$/, '') !== address.replace(/\/$/, '')) {
     throw new Error(`${address} led to ${finalDisplayedUrl}.`);
   }
@@ -44,4 +41,16 @@ export async function audit(address: string, port: number): Promise<Audit> {
         .filter(({ resourceType }) => resourceType === 'Script')
         .reduce((sum, { transferSize = 0 }) => sum + transferSize, 0) / KIB,
   };
+}
+
+async function measured(address: string, port: number): Promise<Result> {
+  const { default: lighthouse, desktopConfig } = await import('lighthouse');
+  const flags = { port, output: 'json', logLevel: 'error', disableStorageReset: true } as const;
+  for (let tries = 1; ; tries += 1) {
+    const ran = await lighthouse(address, flags, desktopConfig);
+    if (ran && !ran.lhr.runtimeError) return ran.lhr;
+    if (tries === TRIES) {
+      throw new Error(`${address}: ${ran?.lhr.runtimeError?.message ?? 'Lighthouse gave nothing'}`);
+    }
+  }
 }

@@ -6,6 +6,7 @@ import {
   type Layer,
   type Projector,
   type SvgNode,
+  type Theme,
   type ThemeName,
 } from '@/lib/draw';
 
@@ -18,10 +19,15 @@ export function PlanShapes({
 }: {
   list: DisplayList;
   projector: Projector;
-  theme: ThemeName;
+  /** A theme by name, or inks of one's own. */
+  theme: ThemeName | Theme;
   layers?: readonly Layer[];
 }) {
-  return svgNodes(list, { projector, theme: THEMES[theme], layers }).map(elementOf);
+  return svgNodes(list, {
+    projector,
+    theme: typeof theme === 'string' ? THEMES[theme] : theme,
+    layers,
+  }).map(elementOf);
 }
 
 function elementOf({ tag, attributes, children }: SvgNode, key: number): ReactNode {

@@ -5,7 +5,9 @@ import { usePathname, useRouter } from 'next/navigation';
 import { useId, type ReactNode } from 'react';
 import { Select } from '@/components/ui/field';
 import { PrintButton } from '@/components/ui/print-button';
-import { PAPERS, SCALES, type LengthUnit } from '@/lib/draw';
+import type { LengthUnit } from '@/lib/draw';
+// Not through the index: a menu must not bring the whole drawing to the browser.
+import { PAPERS, SCALES } from '@/lib/draw/paper';
 import type { HandoutChoice } from './handout-choice';
 
 const MEASURES: Record<LengthUnit, string> = { ft: 'Feet', m: 'Metres' };

@@ -1,13 +1,9 @@
-'use client';
-
-import { useMemo } from 'react';
-import { dateTimeWords } from '@/components/conditions/time-words';
-import { useReadersZone } from '@/components/ui/when';
-import { groundSeen, PAPERS, pxPerMetreAt, SCALES, scaleThatFits } from '@/lib/draw';
-import { piecesOf, placeOf, planeOf } from '@/lib/layout';
+import { groundSeen, pxPerMetreAt, SCALES, scaleThatFits } from '@/lib/draw';
+import { piecesOf, placeOf, planeOf, type Sheet } from '@/lib/layout';
 import { blanksOf } from './blanks';
 import type { HandoutChoice } from './handout-choice';
 import type { HandoutInput } from './handout-input';
+import { LocalDateTime } from './local-words';
 import './handout.css';
 import { EDGE_MM, pageGeometry, PAGE_BODY } from './page-geometry';
 import { PaperPage } from './paper-page';
@@ -21,41 +17,20 @@ import { tablesOf } from './tables';
 /** Room for labels and dimensions round what is placed. */
 const PLAN_MARGIN_MM = 14;
 
-/** The whole handout as it comes out of the printer, one element a sheet. */
+/**
+ * The whole handout as it comes out of the printer, one element a sheet. It is laid out on the
+ * server: a browser has nothing to work out before it can print.
+ */
 export function Handout({ input, choice }: { input: HandoutInput; choice: HandoutChoice }) {
-  const zone = useReadersZone();
   const { paper, units } = choice;
   const { sheet, findings, agencyName } = input;
   const geometry = pageGeometry(paper);
-  const plan = useMemo(() => {
-    const plane = planeOf(sheet.layout);
-    const casualty = piecesOf(sheet.layout.pieces, 'casualty-vehicle')[0];
-    const extent = planExtent(sheet, plane);
-    const window = pageGeometry(paper).plan;
-    const scale = choice.scale ?? scaleThatFits(extent, window, SCALES[units], PLAN_MARGIN_MM);
-    const centre = {
-      x: (extent.min.x + extent.max.x) / 2,
-      y: (extent.min.y + extent.max.y) / 2,
-    };
-    const seen = groundSeen(centre, window, scale);
-    return {
-      scale,
-      seen,
-      zero: casualty ? placeOf(plane, casualty) : { x: 0, y: 0 },
-      beyond: piecesBeyond(sheet, plane, seen),
-    };
-  }, [sheet, paper, units, choice.scale]);
-  const blanks = useMemo(() => blanksOf(sheet, findings), [sheet, findings]);
-  const tables = useMemo(
-    () =>
-      tablePages(tablesOf(input, blanks, units), {
-        widthMm: PAPERS[paper].widthMm - PAGE_BODY.sideMm * 2,
-        heightMm: PAPERS[paper].heightMm - PAGE_BODY.topMm - PAGE_BODY.footMm,
-      }),
-    [input, blanks, units, paper],
-  );
-  // The server knows neither the reader's zone nor a browser's sines to the last digit.
-  if (zone === null) return <p>Laying the plan on paper …</p>;
+  const plan = planOnPaper(sheet, choice);
+  const blanks = blanksOf(sheet, findings);
+  const tables = tablePages(tablesOf(input, blanks, units), {
+    widthMm: geometry.widthMm - PAGE_BODY.sideMm * 2,
+    heightMm: geometry.heightMm - PAGE_BODY.topMm - PAGE_BODY.footMm,
+  });
   const of = 1 + tables.length;
   const foot = `${agencyName} · distances in ${units === 'ft' ? 'feet' : 'metres'}`;
 
@@ -77,7 +52,6 @@ export function Handout({ input, choice }: { input: HandoutInput; choice: Handou
             blanks={blanks}
             units={units}
             scale={plan.scale}
-            zone={zone}
             heightMm={geometry.plan.heightMm}
           />
         </div>
@@ -94,7 +68,7 @@ export function Handout({ input, choice }: { input: HandoutInput; choice: Handou
             <header>
               <h2>{sheet.layout.name ?? 'Not named yet'}</h2>
               <span>
-                version {input.version}, saved {dateTimeWords(input.savedAt, zone)}
+                version {input.version}, saved <LocalDateTime at={input.savedAt} />
               </span>
               <strong>NOT APPROVED</strong>
             </header>
@@ -106,4 +80,20 @@ export function Handout({ input, choice }: { input: HandoutInput; choice: Handou
       ))}
     </div>
   );
+}
+
+/** The scale, the ground that the plan's frame shows at it, and what lies outside. */
+function planOnPaper(sheet: Sheet, { paper, units, scale: chosen }: HandoutChoice) {
+  const plane = planeOf(sheet.layout);
+  const casualty = piecesOf(sheet.layout.pieces, 'casualty-vehicle')[0];
+  const { min, max } = planExtent(sheet, plane);
+  const window = pageGeometry(paper).plan;
+  const scale = chosen ?? scaleThatFits({ min, max }, window, SCALES[units], PLAN_MARGIN_MM);
+  const seen = groundSeen({ x: (min.x + max.x) / 2, y: (min.y + max.y) / 2 }, window, scale);
+  return {
+    scale,
+    seen,
+    zero: casualty ? placeOf(plane, casualty) : { x: 0, y: 0 },
+    beyond: piecesBeyond(sheet, plane, seen),
+  };
 }

@@ -5,9 +5,7 @@ import {
   swingWords,
   downhillWords,
 } from '@/components/conditions/condition-words';
-import { clockWords } from '@/components/conditions/time-words';
 import { countFindings } from '@/components/checks/count-findings';
-import { firstToFailWords } from '@/components/checks/first-to-fail-words';
 import { liquidWords } from '@/components/title-block/liquid-words';
 import { StatusShape } from '@/components/ui/status-mark';
 import { STATUS_WORDS } from '@/components/ui/status';
@@ -17,6 +15,7 @@ import type { Blank } from './blanks';
 import { BlankForm, BlankNumber } from './blank-form';
 import type { HandoutInput } from './handout-input';
 import { Legend } from './legend';
+import { LocalClock, LocalFirstToFail } from './local-words';
 import { STRIP_MM } from './page-geometry';
 import { PaperDial } from './paper-dial';
 import { probeDistances } from './probe-distances';
@@ -27,14 +26,13 @@ type StripProps = {
   blanks: readonly Blank[];
   units: LengthUnit;
   scale: Scale;
-  zone: string;
   heightMm: number;
 };
 
 const COUNTED: readonly Status[] = ['not-met', 'not-known', 'caution', 'meets'];
 
 /** The right strip: how far it has come, the wind, the facts, what to fill in, the title block. */
-export function Strip({ input, blanks, units, scale, zone, heightMm }: StripProps) {
+export function Strip({ input, blanks, units, scale, heightMm }: StripProps) {
   const counts = countFindings(input.findings);
   return (
     <div className="strip" style={{ width: `${STRIP_MM}mm`, height: `${heightMm}mm` }}>
@@ -47,16 +45,17 @@ export function Strip({ input, blanks, units, scale, zone, heightMm }: StripProp
         ))}
       </ul>
       <p className="strip-part">
-        <strong>First to fail:</strong> {firstToFailWords(input.firstToFail, input.asOf, zone)}
+        <strong>First to fail:</strong>{' '}
+        <LocalFirstToFail first={input.firstToFail} asOf={input.asOf} />
       </p>
-      <Weather input={input} zone={zone} />
+      <Weather input={input} />
       <Facts input={input} units={units} />
       <BlanksToFill blanks={blanks} />
       <section className="strip-part rest">
         <h2>Legend</h2>
         <Legend sheet={input.sheet} />
       </section>
-      <TitleBlock input={input} units={units} scale={scale} zone={zone} />
+      <TitleBlock input={input} units={units} scale={scale} />
     </div>
   );
 }
@@ -81,7 +80,7 @@ function BlanksToFill({ blanks }: { blanks: readonly Blank[] }) {
   );
 }
 
-function Weather({ input, zone }: { input: HandoutInput; zone: string }) {
+function Weather({ input }: { input: HandoutInput }) {
   const { conditions } = input.sheet.layout;
   const { values } = input.limits;
   const judged = input.findings.some(
@@ -103,7 +102,15 @@ function Weather({ input, zone }: { input: HandoutInput; zone: string }) {
         {conditions.wind && (
           <>
             <p>{wind.filter(Boolean).join(', ') || 'speed and swing not known'}</p>
-            <p>{seen ? `seen ${clockWords(seen, input.asOf, zone)}` : 'time not known'}</p>
+            <p>
+              {seen ? (
+                <>
+                  seen <LocalClock at={seen} beside={input.asOf} />
+                </>
+              ) : (
+                'time not known'
+              )}
+            </p>
           </>
         )}
         <p>

@@ -1,6 +1,6 @@
-import { dateTimeWords } from '@/components/conditions/time-words';
 import type { LengthUnit, Scale } from '@/lib/draw';
 import type { HandoutInput } from './handout-input';
+import { LocalDateTime } from './local-words';
 import { paperBar } from './paper-scale-bar';
 
 const BAR_MOST_MM = 50;
@@ -10,12 +10,10 @@ export function TitleBlock({
   input,
   units,
   scale,
-  zone,
 }: {
   input: HandoutInput;
   units: LengthUnit;
   scale: Scale;
-  zone: string;
 }) {
   const { name, planned_at: planned } = input.sheet.layout;
   return (
@@ -27,7 +25,7 @@ export function TitleBlock({
         <Cell name="Drawn by">{input.drawnBy ?? '–'}</Cell>
         <Cell name="Checked by">not checked</Cell>
         <Cell name="Revision">draft, version {input.version}</Cell>
-        <Cell name="Planned start">{planned ? dateTimeWords(planned, zone) : 'not planned'}</Cell>
+        <Cell name="Planned start">{planned ? <LocalDateTime at={planned} /> : 'not planned'}</Cell>
       </dl>
       <ScaleBar units={units} scale={scale} />
     </section>

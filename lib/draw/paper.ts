@@ -1,4 +1,5 @@
-import { feetToMetres, METRES_PER_INCH, type Vec } from '../geo';
+import type { Vec } from '../geo';
+import { feetToMetres, METRES_PER_INCH } from '../geo/units';
 import type { Bounds, LengthUnit } from './types';
 
 /** Papers as they lie for a plan: the long side across. */

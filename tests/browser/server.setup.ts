@@ -1,5 +1,4 @@
 import type { TestProject } from 'vitest/node';
-import { stopAll } from '../../scripts/bootstrap/stopping.mjs';
 import { serveBuild, type SignIn } from './support/serve-build';
 
 declare module 'vitest' {
@@ -13,10 +12,6 @@ declare module 'vitest' {
 
 /** One server for all browser tests of a run, gone again after them. */
 export default async function setup(project: TestProject): Promise<() => Promise<void>> {
-  // A signal must not leave a server behind that nobody knows of.
-  for (const signal of ['SIGINT', 'SIGTERM'] as const) {
-    process.once(signal, () => void stopAll().finally(() => process.exit(1)));
-  }
   const { address, signIns, stop } = await serveBuild('the browser tests', 'test/browser');
   project.provide('address', address);
   project.provide('signIns', signIns);

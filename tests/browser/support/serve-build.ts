@@ -27,6 +27,10 @@ export type Served = {
  * the server that TEST_DATABASE_URL (else DATABASE_URL) names, or on a private one.
  */
 export async function serveBuild(what: string, folder: string): Promise<Served> {
+  // A signal must not leave a server behind that nobody knows of.
+  for (const signal of ['SIGINT', 'SIGTERM'] as const) {
+    process.once(signal, () => void stopAll().finally(() => process.exit(1)));
+  }
   const dataFolder = join(root, '.data', folder);
   ensurePrivateFolder(join(root, '.data'));
   const run = await claim(dataFolder, what);

@@ -20,7 +20,7 @@ export const newLayout = z.strictObject({
     ])
     .nullish(),
   /** Where a layout from nothing starts, if the site has no place of its own. */
-  origin: lonLat.nullish(),
+  origin: z.nullish(lonLat),
 });
 
 export const createdLayout = z.object({

@@ -16,7 +16,7 @@ export const newSite = z.strictObject({
   /** The place in words: road, milepost, yard. */
   where: where.nullish(),
   notes: notes.nullish(),
-  at: lonLat.nullish(),
+  at: z.nullish(lonLat),
 });
 export const siteChange = newSite.partial();
 
@@ -24,7 +24,7 @@ export const siteRow = z.object({
   id,
   name: z.string(),
   where: z.string().nullable(),
-  at: lonLat.nullable(),
+  at: z.nullable(lonLat),
   layouts: z.int(),
   /** When the site, its ground or a layout there last changed. */
   changed_at: at,

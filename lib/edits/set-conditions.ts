@@ -1,9 +1,9 @@
-import type { z } from 'zod';
+import type * as z from 'zod/mini';
 import { slope, soil, wind, type Conditions, type Sheet } from '../layout';
 import { same } from './same';
 import { EditError, type EditOf } from './types';
 
-const SCHEMAS = { wind, slope, soil } satisfies Record<string, z.ZodObject>;
+const SCHEMAS = { wind, slope, soil } satisfies Record<string, z.ZodMiniObject>;
 type Condition = keyof typeof SCHEMAS;
 
 /**

@@ -1,3 +1,4 @@
+import * as z from 'zod/mini';
 import { siteGroundSchema, type SiteGround, type Sheet } from '../layout';
 import { same } from './same';
 import { EditError, type EditOf } from './types';
@@ -24,7 +25,7 @@ export function setGround(sheet: Sheet, edit: EditOf<'set-ground'>): Sheet {
 }
 
 /** Features have edits of their own, and checking thousands of them here would be felt. */
-const RECORDED = siteGroundSchema.pick({
+const RECORDED = z.pick(siteGroundSchema, {
   answers: true,
   locates: true,
   overhead_none_known_as_of: true,

@@ -1,8 +1,9 @@
+import * as z from 'zod/mini';
 import { layoutSchema, type Sheet } from '../layout';
 import { same } from './same';
 import { EditError, type EditOf } from './types';
 
-const SETTABLE = layoutSchema.pick({
+const SETTABLE = z.pick(layoutSchema, {
   name: true,
   planned_at: true,
   pump: true,
@@ -15,7 +16,7 @@ export function setLayout(sheet: Sheet, { members }: EditOf<'set-layout'>): Shee
   const given = Object.entries(members).filter(([, value]) => value !== undefined);
   const unknown = given.find(([name]) => !(name in SETTABLE.shape));
   if (unknown) throw new EditError(`The ${unknown[0]} of a layout can't be set.`);
-  const answer = SETTABLE.partial().safeParse(Object.fromEntries(given));
+  const answer = z.partial(SETTABLE).safeParse(Object.fromEntries(given));
   if (!answer.success) {
     const faults = new Set(answer.error.issues.map((issue) => issue.message));
     throw new EditError(`${[...faults].join('; ')}.`);

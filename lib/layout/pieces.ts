@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from 'zod/mini';
 import { above, direction, lonLat, path, rings, between, system, words } from './values';
 
 /**
@@ -8,48 +8,54 @@ import { above, direction, lonLat, path, rings, between, system, words } from '.
  */
 
 /** Members of a file that this version doesn't know; they leave as they came. */
-const more = z
-  .object({
-    properties: z.record(z.string(), z.unknown()).optional(),
-    feature: z.record(z.string(), z.unknown()).optional(),
-  })
-  .optional();
+const more = z.optional(
+  z.object({
+    properties: z.optional(z.record(z.string(), z.unknown())),
+    feature: z.optional(z.record(z.string(), z.unknown())),
+  }),
+);
 
 const id = z
   .string({ error: 'every feature needs a text id' })
-  .min(1, { error: 'the id is empty' })
-  .max(200, { error: 'the id is longer than 200 characters' });
+  .check(
+    z.minLength(1, { error: 'the id is empty' }),
+    z.maxLength(200, { error: 'the id is longer than 200 characters' }),
+  );
 const reference = (what: string) =>
-  z.string({ error: `${what} must name the id of a piece` }).min(1, { error: `${what} is empty` });
+  z
+    .string({ error: `${what} must name the id of a piece` })
+    .check(z.minLength(1, { error: `${what} is empty` }));
 
-const piece = <K extends string, S extends z.ZodRawShape>(kind: K, shape: S) =>
-  z.object({ id, kind: z.literal(kind), label: words('label', 60).optional(), more, ...shape });
+const piece = <K extends string, S extends z.core.$ZodShape>(kind: K, shape: S) =>
+  z.object({ id, kind: z.literal(kind), label: z.optional(words('label', 60)), more, ...shape });
 
 const unitShape = {
   at: lonLat,
-  heading_deg: direction('heading_deg').optional(),
-  length_ft: above('length_ft', 0, 300).optional(),
-  width_ft: above('width_ft', 0, 60).optional(),
+  heading_deg: z.optional(direction('heading_deg')),
+  length_ft: z.optional(above('length_ft', 0, 300)),
+  width_ft: z.optional(above('width_ft', 0, 60)),
 };
 
-const serves = z.array(system, { error: 'serves must list systems' }).optional();
-const diameter = above('diameter_in', 0, 240).optional();
+const serves = z.optional(z.array(system, { error: 'serves must list systems' }));
+const diameter = z.optional(above('diameter_in', 0, 240));
 
 export const casualtyVehicle = piece('casualty-vehicle', unitShape);
 export const receivingVehicle = piece('receiving-vehicle', unitShape);
 export const pump = piece('pump', unitShape);
 export const releasePoint = piece('release-point', { at: lonLat });
-export const vent = piece('vent', { at: lonLat, of: reference('of').optional() });
+export const vent = piece('vent', { at: lonLat, of: z.optional(reference('of')) });
 export const pool = piece('pool', { rings });
 export const rod = piece('rod', {
   at: lonLat,
   system,
-  length_ft: above('length_ft', 0, 200).optional(),
-  driven_ft: between('driven_ft', 0, 200).optional(),
-  diameter_in: above('diameter_in', 0, 12).optional(),
+  length_ft: z.optional(above('length_ft', 0, 200)),
+  driven_ft: z.optional(between('driven_ft', 0, 200)),
+  diameter_in: z.optional(above('diameter_in', 0, 12)),
 });
 export const jumper = piece('jumper', {
-  path: path.refine((p) => p.length <= 2, { error: 'a jumper is a line of two positions' }),
+  path: path.check(
+    z.refine((p) => p.length <= 2, { error: 'a jumper is a line of two positions' }),
+  ),
   from: reference('from'),
   to: reference('to'),
 });
@@ -63,7 +69,7 @@ export const tester = piece('tester', { at: lonLat });
 export const testLead = piece('test-lead', run);
 export const hotZone = piece('hot-zone', { rings });
 export const warmZone = piece('warm-zone', { rings });
-export const note = piece('note', { at: lonLat, text: words('text', 2000).optional() });
+export const note = piece('note', { at: lonLat, text: z.optional(words('text', 2000)) });
 
 export const UTILITIES = [
   'electric',
@@ -75,33 +81,33 @@ export const UTILITIES = [
 ] as const;
 export type Utility = (typeof UTILITIES)[number];
 
-export const noDrive = piece('no-drive', { rings, surface: words('surface').optional() });
-export const lowGround = piece('low-ground', { rings, surface: words('surface').optional() });
+export const noDrive = piece('no-drive', { rings, surface: z.optional(words('surface')) });
+export const lowGround = piece('low-ground', { rings, surface: z.optional(words('surface')) });
 export const buriedLine = piece('buried-line', {
-  paths: z.array(path).min(1, { error: 'a buried line needs at least one line' }),
+  paths: z.array(path).check(z.minLength(1, { error: 'a buried line needs at least one line' })),
   utility: z.enum(UTILITIES, { error: `utility must be one of ${UTILITIES.join(', ')}` }),
   diameter_in: diameter,
-  depth_ft: between('depth_ft', 0, 500).optional(),
-  quality: z.enum(['A', 'B', 'C', 'D'], { error: 'quality is A, B, C or D' }).optional(),
-  material: z
-    .enum(['metal', 'nonmetal', 'unknown'], { error: 'material is metal, nonmetal or unknown' })
-    .optional(),
-  private: z.boolean({ error: 'private must be true or false' }).optional(),
-  owner: words('owner').optional(),
+  depth_ft: z.optional(between('depth_ft', 0, 500)),
+  quality: z.optional(z.enum(['A', 'B', 'C', 'D'], { error: 'quality is A, B, C or D' })),
+  material: z.optional(
+    z.enum(['metal', 'nonmetal', 'unknown'], { error: 'material is metal, nonmetal or unknown' }),
+  ),
+  private: z.optional(z.boolean({ error: 'private must be true or false' })),
+  owner: z.optional(words('owner')),
 });
 export const metalLine = piece('metal-line', {
   path,
-  what: z
-    .enum(['rail', 'guardrail', 'fence', 'culvert'], {
+  what: z.optional(
+    z.enum(['rail', 'guardrail', 'fence', 'culvert'], {
       error: 'what is rail, guardrail, fence or culvert',
-    })
-    .optional(),
+    }),
+  ),
 });
 export const overheadLine = piece('overhead-line', {
   path,
-  volts: between('volts', 0, 2_000_000).optional(),
+  volts: z.optional(between('volts', 0, 2_000_000)),
 });
-export const fixedPoint = piece('fixed-point', { at: lonLat, name: words('name').optional() });
+export const fixedPoint = piece('fixed-point', { at: lonLat, name: z.optional(words('name')) });
 
 /** What a layout holds: drawn for one arrangement, gone with it. */
 export const layoutPiece = z.discriminatedUnion('kind', [
@@ -148,15 +154,18 @@ export type Probe = PieceOf<'z-probe' | 'y-probe'>;
 export type Run = PieceOf<'jumper' | 'ground-cable' | 'bond-cable' | 'hose' | 'test-lead'>;
 export type BuriedLine = PieceOf<'buried-line'>;
 
+const kindOf = (schema: { shape: { kind: z.ZodMiniLiteral<Kind> } }): Kind =>
+  schema.shape.kind.def.values[0]!;
+
 const schemasByKind = new Map(
-  [...layoutPiece.options, ...siteFeature.options].map((option) => [
-    option.shape.kind.value as Kind,
+  [...layoutPiece.def.options, ...siteFeature.def.options].map((option) => [
+    kindOf(option),
     option,
   ]),
 );
 
-export const LAYOUT_KINDS: readonly Kind[] = layoutPiece.options.map((o) => o.shape.kind.value);
-export const SITE_KINDS: readonly Kind[] = siteFeature.options.map((o) => o.shape.kind.value);
+export const LAYOUT_KINDS: readonly Kind[] = layoutPiece.def.options.map(kindOf);
+export const SITE_KINDS: readonly Kind[] = siteFeature.def.options.map(kindOf);
 export const isKind = (kind: string): kind is Kind => schemasByKind.has(kind as Kind);
 export const pieceSchema = (kind: Kind) => schemasByKind.get(kind)!;
 export const isSiteKind = (kind: Kind): boolean => SITE_KINDS.includes(kind);

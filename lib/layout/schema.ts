@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import * as z from 'zod/mini';
 import { layoutPiece, siteFeature, UTILITIES } from './pieces';
 import { above, between, direction, instant, lonLat, words } from './values';
 
@@ -10,35 +10,35 @@ export const MOST_PIECES = 2000;
 
 /** Members are loose: what a later version or another program added survives a round trip. */
 export const wind = z.looseObject({
-  from_deg: direction('from_deg').nullish(),
-  speed_mph: between('speed_mph', 0, 300).nullish(),
-  swing_deg: between('swing_deg', 0, 180).nullish(),
-  observed_at: instant.nullish(),
+  from_deg: z.nullish(direction('from_deg')),
+  speed_mph: z.nullish(between('speed_mph', 0, 300)),
+  swing_deg: z.nullish(between('swing_deg', 0, 180)),
+  observed_at: z.nullish(instant),
 });
 
 export const slope = z.looseObject({
-  down_deg: direction('down_deg').nullish(),
-  grade_pct: between('grade_pct', 0, 1000).nullish(),
+  down_deg: z.nullish(direction('down_deg')),
+  grade_pct: z.nullish(between('grade_pct', 0, 1000)),
 });
 
 export const soil = z.looseObject({
-  resistivity_ohm_m: above('resistivity_ohm_m', 0, 1e7).nullish(),
-  low_ohm_m: above('low_ohm_m', 0, 1e7).nullish(),
-  high_ohm_m: above('high_ohm_m', 0, 1e7).nullish(),
-  source: words('source').nullish(),
+  resistivity_ohm_m: z.nullish(above('resistivity_ohm_m', 0, 1e7)),
+  low_ohm_m: z.nullish(above('low_ohm_m', 0, 1e7)),
+  high_ohm_m: z.nullish(above('high_ohm_m', 0, 1e7)),
+  source: z.nullish(words('source')),
 });
 
 export const conditions = z.looseObject({
-  wind: wind.nullish(),
-  slope: slope.nullish(),
-  soil: soil.nullish(),
+  wind: z.nullish(wind),
+  slope: z.nullish(slope),
+  soil: z.nullish(soil),
 });
 
 export const liquid = z.looseObject({
-  name: words('name').nullish(),
-  un: words('un', 20).nullish(),
-  flash_point_c: between('flash_point_c', -273.15, 2000).nullish(),
-  boiling_point_c: between('boiling_point_c', -273.15, 5000).nullish(),
+  name: z.nullish(words('name')),
+  un: z.nullish(words('un', 20)),
+  flash_point_c: z.nullish(between('flash_point_c', -273.15, 2000)),
+  boiling_point_c: z.nullish(between('boiling_point_c', -273.15, 5000)),
 });
 
 export const KIT_KINDS = [
@@ -58,16 +58,18 @@ export type KitKind = (typeof KIT_KINDS)[number];
 
 export const kitItem = z.looseObject({
   kind: z.enum(KIT_KINDS, { error: `a kit item's kind is one of ${KIT_KINDS.join(', ')}` }),
-  length_ft: above('length_ft', 0, 10_000).nullish(),
-  diameter_in: above('diameter_in', 0, 240).nullish(),
+  length_ft: z.nullish(above('length_ft', 0, 10_000)),
+  diameter_in: z.nullish(above('diameter_in', 0, 240)),
   count: z
     .int({ error: 'count must be a whole number' })
-    .min(0, { error: 'count must be 0 or more' })
-    .max(100_000, { error: 'count must be 100000 or less' }),
+    .check(
+      z.gte(0, { error: 'count must be 0 or more' }),
+      z.lte(100_000, { error: 'count must be 100000 or less' }),
+    ),
 });
 
 export const kit = z.looseObject({
-  name: words('name').nullish(),
+  name: z.nullish(words('name')),
   items: z.array(kitItem, { error: 'a kit needs its list of items' }),
 });
 
@@ -75,18 +77,18 @@ export const PUMP_PLACES = ['separate', 'on-receiving-vehicle', 'none'] as const
 
 export const layoutSchema = z.object({
   version: z.literal(LAYOUT_VERSION),
-  name: words('name', 200).nullable(),
+  name: z.nullable(words('name', 200)),
   /** Where the local plane touches the ground; coordinates on the sheet are counted from here. */
   origin: lonLat,
-  planned_at: instant.nullable(),
-  pump: z.enum(PUMP_PLACES).nullable(),
+  planned_at: z.nullable(instant),
+  pump: z.nullable(z.enum(PUMP_PLACES)),
   conditions,
-  liquid: liquid.nullable(),
-  kit: kit.nullable(),
-  pieces: z.array(layoutPiece).max(MOST_PIECES, {
-    error: `a layout holds at most ${MOST_PIECES} pieces`,
-  }),
-  more: z.record(z.string(), z.unknown()).optional(),
+  liquid: z.nullable(liquid),
+  kit: z.nullable(kit),
+  pieces: z
+    .array(layoutPiece)
+    .check(z.maxLength(MOST_PIECES, { error: `a layout holds at most ${MOST_PIECES} pieces` })),
+  more: z.optional(z.record(z.string(), z.unknown())),
 });
 
 /** The six utility classes, and lines that no locate service answers for. */
@@ -97,22 +99,22 @@ export const ownersAnswer = z.looseObject({
   answer: z.enum(['marked', 'clear', 'waiting'], {
     error: 'an answer is marked, clear or waiting',
   }),
-  at: instant.nullish(),
+  at: z.nullish(instant),
 });
 
 export const locate = z.looseObject({
-  ticket: words('ticket', 100).min(1, { error: 'a ticket needs its number' }),
-  lawful_start: instant.nullish(),
-  valid_until: instant.nullish(),
-  emergency: z.boolean({ error: 'emergency must be true or false' }).nullish(),
+  ticket: words('ticket', 100).check(z.minLength(1, { error: 'a ticket needs its number' })),
+  lawful_start: z.nullish(instant),
+  valid_until: z.nullish(instant),
+  emergency: z.nullish(z.boolean({ error: 'emergency must be true or false' })),
 });
 
-export const answers = z.partialRecord(z.enum(ANSWER_CLASSES), ownersAnswer.nullable());
+export const answers = z.partialRecord(z.enum(ANSWER_CLASSES), z.nullable(ownersAnswer));
 
 export const siteGroundSchema = z.object({
   features: z.array(siteFeature),
   answers,
-  overhead_none_known_as_of: instant.nullable(),
+  overhead_none_known_as_of: z.nullable(instant),
   locates: z.array(locate),
 });
 

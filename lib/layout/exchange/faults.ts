@@ -1,4 +1,4 @@
-import type { z } from 'zod';
+import type * as z from 'zod/mini';
 
 /** What is wrong with a file and where, as `features[3].properties.system`. */
 export type Fault = { readonly path: string; readonly message: string };
@@ -18,7 +18,7 @@ export const pathText = (steps: readonly Step[]): string =>
 
 /** Faults of a failed parse. `lead` turns a path inside the value into one inside the file. */
 export function faultsOf(
-  error: z.ZodError,
+  error: z.core.$ZodError,
   lead: (steps: readonly Step[]) => readonly Step[] = (steps) => steps,
 ): Fault[] {
   return error.issues.map((issue) => ({

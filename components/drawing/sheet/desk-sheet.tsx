@@ -1,7 +1,6 @@
 'use client';
 
-import { KitShelf } from '@/components/kit';
-import { FloatingTag, Strip } from './after-plan';
+import { FloatingTag, KitShelf, Strip } from './after-plan';
 import { Complaint } from './complaint';
 import { IndexTabs } from './index-tabs';
 import { More } from './more';

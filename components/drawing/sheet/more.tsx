@@ -1,22 +1,10 @@
 'use client';
 
-import Link from 'next/link';
 import { useEffect, useId, useRef, useState } from 'react';
-import { ThemeSwitch } from '@/components/ui/theme-switch';
-import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
-import { downloadSheet } from '../files/download';
-import { useScreen } from '../screen-store';
+import { MoreList } from './after-plan';
 
-const ITEM =
-  'flex min-h-11 w-full cursor-pointer items-center px-3 text-left underline-offset-4 hover:underline';
-
-/** What is wanted now and then: files, history, the keys, the way back to the site. */
+/** Opens what is wanted now and then. */
 export function More() {
-  const store = useDrawingStore();
-  const { layoutId, siteId, siteName } = useDrawing((state) => state.meta);
-  const canDraw = useDrawing((state) => state.canDraw);
-  const showKeys = useScreen((state) => state.showKeys);
-  const showFile = useScreen((state) => state.showFile);
   const [open, setOpen] = useState(false);
   const box = useRef<HTMLDivElement>(null);
   const listId = useId();
@@ -33,11 +21,6 @@ export function More() {
       document.removeEventListener('focusin', close);
     };
   }, [open]);
-
-  const doing = (work: () => void) => () => {
-    setOpen(false);
-    work();
-  };
 
   return (
     <div
@@ -64,53 +47,7 @@ export function More() {
         hidden={!open}
         className="absolute right-0 top-full z-[900] w-64 border-[1.5px] border-ink bg-paper py-1"
       >
-        <li>
-          <a href="#pieces" className={ITEM} onClick={() => setOpen(false)}>
-            Pieces table
-          </a>
-        </li>
-        <li>
-          <Link href={`/layouts/${layoutId}/history`} className={ITEM}>
-            History of this layout
-          </Link>
-        </li>
-        <li>
-          <button
-            type="button"
-            className={ITEM}
-            onClick={doing(() => {
-              const { history, limits } = store.getState();
-              void downloadSheet(history.present, limits);
-            })}
-          >
-            Save as a file
-          </button>
-        </li>
-        {canDraw && (
-          <li>
-            <button type="button" className={ITEM} onClick={doing(() => showFile(true))}>
-              Bring in a file
-            </button>
-          </li>
-        )}
-        <li>
-          <button type="button" className={ITEM} onClick={doing(() => showKeys(true))}>
-            Keys
-          </button>
-        </li>
-        <li className="border-t border-rule px-3">
-          <ThemeSwitch />
-        </li>
-        <li className="border-t border-rule">
-          <Link href={`/sites/${siteId}`} className={ITEM}>
-            Site: {siteName}
-          </Link>
-        </li>
-        <li>
-          <Link href="/sites" className={ITEM}>
-            All sites
-          </Link>
-        </li>
+        <MoreList onDone={() => setOpen(false)} />
       </ul>
     </div>
   );

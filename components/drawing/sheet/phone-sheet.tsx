@@ -2,11 +2,10 @@
 
 import { useState } from 'react';
 import { FIELD_CAUTION_WORDS } from '@/components/ui/caution';
-import { WindChip } from '@/components/conditions/wind-chip';
 import { undoLabel } from '@/lib/edits';
 import { useDrawing, useDrawingStore } from '@/lib/client/use-drawing';
 import { useScreen } from '../screen-store';
-import { PhonePanel } from './after-plan';
+import { PhonePanel, WindChip } from './after-plan';
 import { Complaint } from './complaint';
 import { More } from './more';
 import { PlanFrame } from './plan-frame';

@@ -1,27 +1,27 @@
 import AxeBuilder from '@axe-core/playwright';
 import type { Page } from 'playwright-core';
 import { describe, expect, test } from 'vitest';
+import { DEMO_LAYOUTS } from '@/demo/demo';
 import { openPageAs, withChromium } from './support/browser';
 
 withChromium();
 
+const DEMO_NAMES = DEMO_LAYOUTS.map(({ name }) => name);
+
 const PX_PER_MM = 96 / 25.4;
 const POINTS_PER_MM = 72 / 25.4;
 
-/** Every demo layout, by its name. */
+/** The demo's own layouts: other tests lay copies beside them. */
 async function demoLayouts(page: Page): Promise<{ name: string; id: string }[]> {
-  return page.evaluate(async () => {
+  const all = await page.evaluate(async () => {
     const json = async (path: string) => (await fetch(path)).json() as Promise<never>;
     const { sites } = (await json('/api/sites')) as { sites: { id: string }[] };
     const lists = await Promise.all(
       sites.map(({ id }) => json(`/api/sites/${id}/layouts`) as Promise<unknown>),
     );
-    const all = lists.flatMap(
-      (list) => (list as { layouts: { id: string; name: string }[] }).layouts,
-    );
-    // Other tests may have laid copies beside the demo's own.
-    return [...new Map(all.map((layout) => [layout.name, layout])).values()].slice(0, 6);
+    return lists.flatMap((list) => (list as { layouts: { id: string; name: string }[] }).layouts);
   });
+  return DEMO_NAMES.flatMap((name) => all.filter((layout) => layout.name === name).slice(0, 1));
 }
 
 async function openHandout(page: Page, id: string, asked = ''): Promise<void> {

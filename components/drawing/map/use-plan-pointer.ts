@@ -11,6 +11,8 @@ import type { ViewStore } from './view-store';
 /** Two presses closer than this in time and place are a double click. */
 const DOUBLE_MS = 400;
 const DOUBLE_PX = 24;
+/** The bench counts the script that was fetched before this mark. */
+const ANSWERS = 'plan-answers';
 
 type Find = (at: Vec, metresPerPx: number, pointer: PointerType) => Under;
 
@@ -130,6 +132,8 @@ export function usePlanPointer(
     box.addEventListener('pointerleave', onLeave);
     box.addEventListener('mousedown', keepFromLeaflet, early);
     box.addEventListener('touchstart', keepFromLeaflet, early);
+    // From here on the drawing answers: what was fetched before is what a reader waits for.
+    performance.mark(ANSWERS);
     return () => {
       box.removeEventListener('pointerdown', onDown, early);
       box.removeEventListener('pointermove', onMove, early);

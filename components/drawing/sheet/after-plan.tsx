@@ -26,7 +26,7 @@ const Words = () => (
 );
 
 /** As high as the shelf will be, so that the plan keeps its size when it comes. */
-const ShelfRoom = () => <div className="min-h-[8.5rem]" />;
+const ShelfRoom = () => <div className="min-h-[7.609375rem] max-xl:min-h-[9.359375rem]" />;
 const Nothing = () => null;
 
 export const KitShelf = afterPlan(

@@ -15,9 +15,9 @@ export function DeskSheet() {
       <div className="h-dvh min-h-[38rem] p-2">
         <div className="grid h-full grid-cols-[minmax(0,1fr)_24.5rem] border border-rule">
           <main className="flex min-h-0 min-w-0 flex-col" aria-label="Plan">
-            <div className="flex min-w-0 items-end justify-between gap-3 pl-8 pr-4 pt-1.5">
+            <div className="flex min-w-0 items-end justify-between gap-x-3 pl-8 pr-4 pt-1.5 max-xl:flex-col-reverse max-xl:items-stretch">
               <IndexTabs />
-              <div className="flex min-w-0 items-center gap-2.5">
+              <div className="flex min-w-0 items-center justify-end gap-2.5">
                 <SaveLine />
                 <More />
               </div>

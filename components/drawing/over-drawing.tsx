@@ -1,10 +1,15 @@
 'use client';
 
 import dynamic from 'next/dynamic';
+import { keepTrying } from './keep-trying';
 import { useScreen } from './screen-store';
 
-const KeysDialog = dynamic(() => import('./keys-dialog').then((m) => m.KeysDialog));
-const FileDialog = dynamic(() => import('./files/file-dialog').then((m) => m.FileDialog));
+const KeysDialog = dynamic(() =>
+  keepTrying(() => import('./keys-dialog').then((m) => m.KeysDialog)),
+);
+const FileDialog = dynamic(() =>
+  keepTrying(() => import('./files/file-dialog').then((m) => m.FileDialog)),
+);
 
 /** Sheets laid over the drawing; their code comes when one is asked for. */
 export function OverDrawing() {

@@ -58,17 +58,20 @@ describe('saving', () => {
     const page = await openPageAs('planner', { expectedComplaints: EXPECTED });
     const layoutId = await layoutOf(page, 'Crash');
     await openDrawing(page, layoutId);
-    await page.route('**/api/layouts/*', (route) =>
+    // On the whole browser, so that nothing slips through while the page is going down.
+    const context = page.context();
+    await context.route('**/api/layouts/*', (route) =>
       route.request().method() === 'PUT' ? route.abort() : route.continue(),
     );
     await rename(page, 'Not saved when it died');
     await expect.poll(() => saveWords(page).getAttribute('data-save'), SOON).toBe('offline');
     const address = page.url();
-    const after = await page.context().newPage();
+    const after = await context.newPage();
     await page.close({ runBeforeUnload: false });
     await after.goto(address);
     const ask = after.getByRole('alertdialog');
     await ask.getByText('This browser kept changes that were not saved').waitFor();
+    await context.unroute('**/api/layouts/*');
     expect(await nameOnServer(after, layoutId)).toBe('Crash');
     await ask.getByRole('button', { name: 'Go on with the kept changes' }).click();
     await saved(after);

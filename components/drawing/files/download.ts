@@ -1,9 +1,10 @@
+import { keepTrying } from '../keep-trying';
 import type { Limits } from '@/lib/limits';
 import type { Sheet } from '@/lib/layout';
 
 /** Hands the sheet to the reader as an exchange file, without asking the server for anything. */
 export async function downloadSheet(sheet: Sheet, limits: Limits): Promise<void> {
-  const { writeExchange } = await import('@/lib/layout/exchange');
+  const { writeExchange } = await keepTrying(() => import('@/lib/layout/exchange'));
   const text = JSON.stringify(writeExchange({ sheet, limits }), null, 2);
   const address = URL.createObjectURL(new Blob([text], { type: 'application/geo+json' }));
   const link = document.createElement('a');

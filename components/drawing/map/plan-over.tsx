@@ -11,6 +11,7 @@ import { drawGrid, drawLayout, drawSite, joined, type Bounds } from '@/lib/draw'
 import type { LocalPlane } from '@/lib/geo';
 import { emptyLayout, findPiece, isSiteKind, unitOf } from '@/lib/layout';
 import { useTheme } from '@/components/ui/use-theme';
+import { keepTrying } from '../keep-trying';
 import { pieceName } from '../piece-words';
 import { GlideWith } from './glide-with';
 import { handList, jumperBand } from './hand-list';
@@ -25,7 +26,7 @@ import { sceneOf, usePlanTool } from './use-plan-tool';
 import { useView, useViewStore } from './view-store';
 
 /** The canvas comes after the plan answers; until then all of the list is painted as SVG. */
-const PlanStage = dynamic(() => import('./plan-stage'), { ssr: false });
+const PlanStage = dynamic(() => keepTrying(() => import('./plan-stage')), { ssr: false });
 
 const NOTHING = { groups: [] };
 /** Handles are small; a mouse may miss them by this much, px. */

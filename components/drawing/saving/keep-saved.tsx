@@ -2,11 +2,16 @@
 
 import dynamic from 'next/dynamic';
 import { createContext, useContext, useState, type ReactNode } from 'react';
+import { keepTrying } from '../keep-trying';
 import { useSaving } from './use-saving';
 
 // Asked for seldom: their code comes only when there is something to ask.
-const DraftDialog = dynamic(() => import('./draft-dialog').then((m) => m.DraftDialog));
-const StaleDialog = dynamic(() => import('./stale-dialog').then((m) => m.StaleDialog));
+const DraftDialog = dynamic(() =>
+  keepTrying(() => import('./draft-dialog').then((m) => m.DraftDialog)),
+);
+const StaleDialog = dynamic(() =>
+  keepTrying(() => import('./stale-dialog').then((m) => m.StaleDialog)),
+);
 
 type Asks = {
   /** Asks again which of two versions to keep, after "Decide later". */

@@ -2,6 +2,7 @@
 
 import dynamic from 'next/dynamic';
 import type { ComponentType } from 'react';
+import { keepTrying } from '../keep-trying';
 import { useView } from '../map/view-store';
 
 /**
@@ -12,7 +13,7 @@ function afterPlan<Props extends object>(
   load: () => Promise<ComponentType<Props>>,
   Coming: ComponentType = Words,
 ): ComponentType<Props> {
-  const Part = dynamic<Props>(load, { ssr: false, loading: () => <Coming /> });
+  const Part = dynamic<Props>(() => keepTrying(load), { ssr: false, loading: () => <Coming /> });
   return function AfterPlan(props: Props) {
     const answers = useView((state) => state.view !== null);
     return answers ? <Part {...props} /> : <Coming />;

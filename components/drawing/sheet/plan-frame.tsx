@@ -4,11 +4,12 @@ import dynamic from 'next/dynamic';
 import type { ReactNode } from 'react';
 import { CAUTION_WORDS } from '@/components/ui/caution';
 import { useDrawing } from '@/lib/client/use-drawing';
+import { keepTrying } from '../keep-trying';
 import { Border } from './border';
 import { ZoomCells } from './zoom-cells';
 
 /** Leaflet and Konva need a window: the plan is drawn in the browser only. */
-const DrawingMap = dynamic(() => import('../map/drawing-map'), {
+const DrawingMap = dynamic(() => keepTrying(() => import('../map/drawing-map')), {
   ssr: false,
   loading: () => <p className="p-6">Unrolling the plan …</p>,
 });

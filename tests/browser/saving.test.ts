@@ -19,6 +19,8 @@ async function layoutOf(page: Page, name: string): Promise<string> {
 async function openDrawing(page: Page, layoutId: string): Promise<void> {
   await page.goto(`/layouts/${layoutId}`);
   await drawingReady(page);
+  // The strip is fetched after the plan; these tests type in it once the connection has gone.
+  await page.getByRole('region', { name: 'Title block' }).getByRole('heading').waitFor();
 }
 
 /** A change that needs no plan: the layout's name, typed in the title block. */
@@ -66,8 +68,14 @@ describe('saving', () => {
     await rename(page, 'Not saved when it died');
     await expect.poll(() => saveWords(page).getAttribute('data-save'), SOON).toBe('offline');
     const address = page.url();
+    // Closing would not do: the page saves on its way out. A crash gives it no way out.
+    const crashed = page.waitForEvent('crash');
+    const gone = page.goto('chrome://crash').catch((error: unknown) => String(error));
+    await crashed;
     const after = await context.newPage();
-    await page.close({ runBeforeUnload: false });
+    await page.close();
+    await gone;
+    await context.unroute('**/api/layouts/*');
     await after.goto(address);
     const ask = after.getByRole('alertdialog');
     await ask.getByText('This browser kept changes that were not saved').waitFor();

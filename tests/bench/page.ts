@@ -4,6 +4,7 @@ import { join } from 'node:path';
 import { chromium, type BrowserContext, type Page } from 'playwright-core';
 import { anyFreePort } from '../../scripts/bootstrap/ports.mjs';
 import { progressOnStderr } from '../../scripts/bootstrap/say.mjs';
+import { drawingReady } from '../browser/support/drawing';
 import { serveBuild } from '../browser/support/serve-build';
 import { audit, type Audit } from './lighthouse';
 import { resultOf, type Bench } from './result';
@@ -151,11 +152,12 @@ async function scriptKibUntilPointer(context: BrowserContext, path: string): Pro
   return kib;
 }
 
-/** A click on a piece is answered when the piece says that it is chosen. */
+/** A click at a piece's place is answered when the facts of what lies there open. */
 async function answersPointer(tab: Page): Promise<void> {
-  const piece = tab.locator('button[data-piece]').first();
-  await piece.waitFor({ timeout: POINTER_ANSWERED_MS });
-  await piece.click();
+  await drawingReady(tab);
+  const box = await tab.locator('button[data-piece]').first().boundingBox();
+  if (!box) throw new Error('There is no piece on the plan.');
+  await tab.mouse.click(box.x + box.width / 2, box.y + box.height / 2);
   await tab
     .locator('section[aria-label$=", facts"]')
     .first()
